@@ -40,6 +40,7 @@ function printUrls({ cluster, database }) {
 
 await runScript({
   usage,
+  words: true,
   options: { fast: { type: 'boolean', default: false }, database: { type: 'string', default: 'lydite' } },
   async run({ values, positionals: [name] }) {
     const action = Object.hasOwn(actions, name ?? '') ? actions[name] : undefined;

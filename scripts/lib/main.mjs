@@ -9,12 +9,12 @@ export class Refusal extends Error {
 }
 
 /**
- * Runs a script: prints its usage for --help, refuses unknown options (exit 2), turns a Refusal into a plain line.
- * @param {{usage: string, options?: object, run: (args: {values: object, positionals: string[]}) => unknown}} script
+ * Runs a script: prints its usage for --help, refuses unknown options, and words unless it takes some (exit 2), turns a Refusal into a plain line.
+ * @param {{usage: string, options?: object, words?: boolean, run: (args: {values: object, positionals: string[]}) => unknown}} script
  */
-export async function runScript({ usage, options = {}, run }) {
+export async function runScript({ usage, options = {}, words = false, run }) {
   try {
-    const args = readArgs({ usage, options });
+    const args = readArgs({ usage, options, words });
     if (args.values.help) console.log(usage);
     else await run(args);
   } catch (error) {
@@ -23,9 +23,9 @@ export async function runScript({ usage, options = {}, run }) {
   }
 }
 
-function readArgs({ usage, options }) {
+function readArgs({ usage, options, words }) {
   try {
-    return parseArgs({ allowPositionals: true, options: { ...options, help: { type: 'boolean', short: 'h' } } });
+    return parseArgs({ allowPositionals: words, options: { ...options, help: { type: 'boolean', short: 'h' } } });
   } catch (error) {
     throw new Refusal(`${error.message}\n\n${usage}`, { exitCode: 2 });
   }
