@@ -1,0 +1,99 @@
+import { currencySign, formatMoney } from '../text/format-money.ts';
+import { formatNumber } from '../text/format-number.ts';
+import { NBSP } from '../text/characters.ts';
+import { goldTicks, moneyTicks } from './streak-axis.ts';
+import type { MoneyScale, StreakBid } from './streak-types.ts';
+
+interface ScaleProps {
+  axisMaxG: number;
+  width: number;
+  isWide: boolean;
+}
+
+/** Room a label needs, px: around the bid's flag, and at the left where the axis is named. */
+const FLAG_CLEARANCE = { wide: 120, phone: 76 };
+const NAME_CLEARANCE = { wide: 190, phone: 20 };
+
+interface MoneyScaleProps extends ScaleProps {
+  money: MoneyScale;
+  bid: StreakBid | null;
+  flag: string;
+}
+
+const currencyNames: Record<string, string> = { USD: 'US$' };
+
+/** The stone's upper edge: the bid that breaks even at each content. The drawing names the same figures, so it is hidden from speech. */
+export function MoneyAxis({ axisMaxG, width, isWide, money, bid, flag }: MoneyScaleProps) {
+  const share = (goldG: number) => goldG / axisMaxG;
+  const flagShare = bid ? Math.min(Math.max(share(bid.breakEvenG), 0), 1) : null;
+  const clear = FLAG_CLEARANCE[isWide ? 'wide' : 'phone'];
+  const ticks = moneyTicks(axisMaxG, money, isWide ? 14 : 4).filter(({ goldG }) => {
+    const x = share(goldG) * width;
+    const isByFlag = flagShare !== null && Math.abs(x - flagShare * width) < clear;
+    return !isByFlag && x > NAME_CLEARANCE[isWide ? 'wide' : 'phone'] && x < width - 24;
+  });
+  const hidesName = flagShare !== null && flagShare * width < NAME_CLEARANCE.wide + 70;
+  const name = currencyNames[money.currency] ?? money.currency;
+  return (
+    <div className="scale scale-top" aria-hidden="true">
+      {isWide && !hidesName && <span className="axis-name">Bid that breaks even, {name}</span>}
+      {ticks.map(({ amountMinor, goldG }) => (
+        <span key={amountMinor} style={{ left: `${share(goldG) * 100}%` }}>
+          {currencySign(money.currency)}
+          {formatNumber(amountMinor / 100)}
+        </span>
+      ))}
+      {bid && flagShare !== null && (
+        <b className={flagClass(flagShare, width)} style={{ left: `${flagShare * 100}%` }}>
+          {flag} <span className="num">{formatMoney(bid.amountMinor, money.currency)}</span>
+        </b>
+      )}
+    </div>
+  );
+}
+
+function flagClass(share: number, width: number): string {
+  if (share * width < 70) return 'flag at-start';
+  return share * width > width - 70 ? 'flag at-end' : 'flag';
+}
+
+/** The stone's lower edge: grams of gold. */
+export function GoldAxis({ axisMaxG, isWide }: Omit<ScaleProps, 'width'>) {
+  const ticks = goldTicks(axisMaxG, isWide ? 12 : 4).filter((goldG) => goldG <= axisMaxG * 0.94);
+  return (
+    <div className="scale" aria-hidden="true">
+      {ticks.map((goldG) => (
+        <span
+          key={goldG}
+          className={goldG === 0 ? 'at-start' : undefined}
+          style={{ left: `${(goldG / axisMaxG) * 100}%` }}
+        >
+          {formatNumber(goldG)}
+        </span>
+      ))}
+      <span className="at-end" style={{ left: '100%' }}>
+        {formatNumber(axisMaxG)}
+        {NBSP}g
+      </span>
+    </div>
+  );
+}
+
+interface PastAssaysProps {
+  axisMaxG: number;
+  goldG: readonly number[];
+}
+
+/** Past assays of like lots, scaled to this lot's mass: the reference class beside the estimate. */
+export function PastAssays({ axisMaxG, goldG }: PastAssaysProps) {
+  const label = `${goldG.length} past ${goldG.length === 1 ? 'assay' : 'assays'} of like lots, at this mass`;
+  const shown = goldG.filter((one) => one <= axisMaxG);
+  return (
+    <div className="past-assays">
+      <span>{label}</span>
+      {shown.map((one, i) => (
+        <i key={i} aria-hidden="true" style={{ left: `${(one / axisMaxG) * 100}%` }} />
+      ))}
+    </div>
+  );
+}

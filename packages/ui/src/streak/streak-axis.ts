@@ -1,0 +1,74 @@
+import { tickStep, ticks } from 'd3-array';
+import { scaleLinear, scaleLog } from 'd3-scale';
+import type { StreakGeometry } from './geometry.ts';
+import type { MoneyScale, StreakEstimate } from './streak-types.ts';
+
+/** Ends of the list's common axis, grams of gold per tonne. */
+export const GRADE_AXIS: readonly [number, number] = [20, 6000];
+const GRADE_TICKS = [50, 100, 200, 500, 1000, 2000];
+
+export interface StreakAxis {
+  /** Position in px of an amount of gold in grams. */
+  x: (goldG: number) => number;
+  /** Positions of the grid lines in px. */
+  grid: number[];
+}
+
+/** End of the gram axis: 1.1 times the 99.5th percentile, carried on to the next tick so that the axis ends on a figure. */
+export function streakAxisMaxG(estimate: StreakEstimate): number {
+  const wanted = estimate.goldG.quantiles.p99_5 * 1.1;
+  const step = tickStep(0, wanted, 12);
+  return Math.ceil(wanted / step - 1e-9) * step;
+}
+
+/** Ticks in grams from 0 to the end of the axis. */
+export function goldTicks(axisMaxG: number, count: number): number[] {
+  return ticks(0, axisMaxG, count);
+}
+
+/** The linear gram axis of a single lot. */
+export function linearAxis(geometry: StreakGeometry, axisMaxG: number): StreakAxis {
+  const scale = scaleLinear([0, axisMaxG], [0, geometry.width]);
+  const grid = geometry.gridLines === 0 ? [] : goldTicks(axisMaxG, geometry.gridLines);
+  return { x: scale, grid: grid.filter((goldG) => goldG > 0 && goldG < axisMaxG).map(scale) };
+}
+
+/** The list's axis: grade on a log scale, so that lots of any mass compare. `massG` turns gold into grade. */
+export function gradeAxis(geometry: StreakGeometry, massG: number): StreakAxis {
+  const scale = scaleLog(GRADE_AXIS, [0, geometry.width]).clamp(true);
+  const x = (goldG: number) => scale(Math.max((goldG / massG) * 1e6, GRADE_AXIS[0] / 10));
+  return { x, grid: GRADE_TICKS.map(scale) };
+}
+
+/** Ticks of the list's axis as shares of its width, for the head of the column. */
+export function gradeTicks(): { gradeGPerT: number; share: number }[] {
+  return GRADE_TICKS.map((gradeGPerT) => ({ gradeGPerT, share: gradeShare(gradeGPerT) }));
+}
+
+/** Where a grade stands on the list's axis, 0 … 1. */
+export function gradeShare(gradeGPerT: number): number {
+  return scaleLog(GRADE_AXIS, [0, 1]).clamp(true)(gradeGPerT);
+}
+
+/** The bid in minor units that breaks even at an amount of gold, not below 0. */
+export function bidAt(goldG: number, money: MoneyScale): number {
+  return Math.max(0, money.atZeroMinor + money.perGMinor * goldG);
+}
+
+/** The gold in grams at which a bid breaks even. */
+export function goldAt(amountMinor: number, money: MoneyScale): number {
+  return (amountMinor - money.atZeroMinor) / money.perGMinor;
+}
+
+/** Round bids for the upper edge, each with the gold it needs. */
+export function moneyTicks(
+  axisMaxG: number,
+  money: MoneyScale,
+  count: number,
+): { amountMinor: number; goldG: number }[] {
+  const fromMinor = Math.max(0, money.atZeroMinor);
+  return ticks(fromMinor / 100, bidAt(axisMaxG, money) / 100, count).map((amount) => {
+    const amountMinor = Math.round(amount * 100);
+    return { amountMinor, goldG: goldAt(amountMinor, money) };
+  });
+}
