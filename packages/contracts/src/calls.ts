@@ -1,5 +1,5 @@
 import type { z } from 'zod';
-import type { Api } from './index.ts';
+import type { Api } from './api.ts';
 
 /** A route of the API, such as `POST /lots/:lotCode/bids`. */
 export type Route = keyof Api;

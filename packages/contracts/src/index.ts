@@ -1,10 +1,4 @@
-import { bidEndpoints } from './bids.ts';
-import { dealEndpoints } from './deals.ts';
-import { deskEndpoints } from './desk.ts';
-import { lotEndpoints } from './lots.ts';
-import { marketEndpoints } from './market.ts';
-import { memberEndpoints } from './members.ts';
-
+export * from './api.ts';
 export * from './bids.ts';
 export * from './calls.ts';
 export * from './common.ts';
@@ -16,14 +10,3 @@ export * from './estimates.ts';
 export * from './lots.ts';
 export * from './market.ts';
 export * from './members.ts';
-
-/** Every route of the API. The server mounts it, the clients are typed by it, OpenAPI and the access matrix test are generated from it. */
-export const api = {
-  ...memberEndpoints,
-  ...marketEndpoints,
-  ...lotEndpoints,
-  ...bidEndpoints,
-  ...dealEndpoints,
-  ...deskEndpoints,
-};
-export type Api = typeof api;

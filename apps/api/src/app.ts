@@ -1,0 +1,39 @@
+import cookieParser from 'cookie-parser';
+import express, { type Express } from 'express';
+import { clientPages } from './platform/client-pages.ts';
+import {
+  brake,
+  noStore,
+  refuseCrossSite,
+  refuseRepeatedQuery,
+  refuseTrace,
+  requestId,
+  securityHeaders,
+} from './platform/guards.ts';
+import { healthRoutes } from './platform/health.ts';
+import { notFound, sendError } from './platform/http-errors.ts';
+import { openApiRoute } from './platform/openapi.ts';
+import { createRoutes } from './platform/routes.ts';
+import { createUpload } from './platform/upload.ts';
+import type { World } from './platform/world.ts';
+
+/** The only file that knows all features: builds their services, binds their routes, mounts the error handler. */
+export function bindRoutes(world: World) {
+  const { sessions, settings } = world;
+  const routes = createRoutes({ sessions, upload: createUpload(), guard: refuseCrossSite(settings.PUBLIC_URL) });
+
+  return routes;
+}
+
+export function createApp(world: World): Express {
+  const { settings, log } = world;
+  const app = express();
+  app.disable('x-powered-by');
+  app.set('trust proxy', settings.TRUSTED_PROXIES);
+  app.use(requestId, refuseTrace, securityHeaders, healthRoutes(world));
+  app.use('/api', noStore, brake({ perMinute: 600, on: settings.LIMITS }), cookieParser(), refuseRepeatedQuery);
+  app.use('/api', openApiRoute(settings.PUBLIC_URL), bindRoutes(world).router, notFound);
+  if (settings.CLIENTS_DIR) app.use(clientPages(settings.CLIENTS_DIR));
+  app.use(notFound, sendError(log));
+  return app;
+}

@@ -1,0 +1,22 @@
+import { createOwnerSource } from './data-source.ts';
+
+const usage = 'usage: command migrate | seed | ledger-check | operators-first MAIL MAIL';
+
+async function migrate(): Promise<void> {
+  const url = process.env.DATABASE_OWNER_URL;
+  if (!url) throw new Error('Set DATABASE_OWNER_URL: migrations run as the owner of the tables.');
+  const owner = await createOwnerSource(url).initialize();
+  const done = await owner.runMigrations();
+  await owner.destroy();
+  console.log(done.length === 0 ? 'The schema is up to date.' : done.map((one) => `Ran ${one.name}.`).join('\n'));
+}
+
+const commands: Record<string, (args: string[]) => Promise<void>> = { migrate };
+
+const [name = '', ...args] = process.argv.slice(2);
+const command = commands[name];
+if (!command) {
+  console.error(usage);
+  process.exit(2);
+}
+await command(args);

@@ -1,0 +1,5 @@
+declare namespace Express {
+  interface Request {
+    id: string;
+  }
+}

@@ -1,0 +1,52 @@
+import { setTimeout as sleep } from 'node:timers/promises';
+import type { JobHandlers } from './platform/jobs.ts';
+import { createOutboxRunner, type OutboxHandler } from './platform/outbox.ts';
+import type { World } from './platform/world.ts';
+
+/** What each kind of outbox item does, except `alarm`, which belongs to the job queue. */
+export function outboxHandlers(_world: World): Record<string, OutboxHandler> {
+  return {};
+}
+
+/** What each job does when it rings. */
+export function jobHandlers(_world: World): JobHandlers {
+  const nothing = async (): Promise<void> => {};
+  return {
+    'lot.close': nothing,
+    'under-offer.lapse': nothing,
+    'deal.deadline': nothing,
+    sweep: nothing,
+    'prices.take': nothing,
+    'payments.poll': nothing,
+    'ledger.check': nothing,
+  };
+}
+
+export const createRunner = (world: World, extra: Record<string, OutboxHandler> = {}) =>
+  createOutboxRunner(world.db, { ...outboxHandlers(world), ...extra }, (error, item) =>
+    world.log.warn({ err: error, kind: item.kind, key: item.key, attempts: item.attempts }, 'outbox item failed'),
+  );
+
+/** Calls `step` again at once while it has work, and every `idleMs` otherwise, until stopped. */
+export function loop(
+  step: () => Promise<boolean>,
+  { idleMs, onError }: { idleMs: number; onError: (error: unknown) => void },
+) {
+  const stopping = new AbortController();
+  const run = async (): Promise<void> => {
+    while (!stopping.signal.aborted) {
+      const busy = await step().catch((error: unknown) => {
+        onError(error);
+        return false;
+      });
+      if (!busy) await sleep(idleMs, undefined, { signal: stopping.signal }).catch(() => {});
+    }
+  };
+  const done = run();
+  return {
+    stop: async (): Promise<void> => {
+      stopping.abort();
+      await done;
+    },
+  };
+}
