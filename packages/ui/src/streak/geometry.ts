@@ -14,8 +14,8 @@ export interface StreakGeometry {
   /** Distance of notch and chevron from the upper edge: rows of a list share one stone and have no edge to cut. */
   markTop: number;
   axis: 'linear' | 'log';
-  /** Wanted number of grid lines; 0 draws none. */
-  gridLines: number;
+  /** Grid lines: about so many at round figures, or quarters of the axis. */
+  gridLines: number | 'quarters' | 'none';
 }
 
 const geometries: Record<StreakSize, StreakGeometry> = {
@@ -53,7 +53,7 @@ const geometries: Record<StreakSize, StreakGeometry> = {
     chevron: [14, 9.5],
     markTop: 0,
     axis: 'linear',
-    gridLines: 4,
+    gridLines: 'quarters',
   },
   card: {
     width: 360,
@@ -65,7 +65,7 @@ const geometries: Record<StreakSize, StreakGeometry> = {
     chevron: [14, 9.5],
     markTop: 0,
     axis: 'linear',
-    gridLines: 4,
+    gridLines: 'quarters',
   },
   row: {
     width: 200,
@@ -77,7 +77,7 @@ const geometries: Record<StreakSize, StreakGeometry> = {
     chevron: [12, 8],
     markTop: 0,
     axis: 'linear',
-    gridLines: 0,
+    gridLines: 'none',
   },
   cell: {
     width: 560,
@@ -101,7 +101,7 @@ const geometries: Record<StreakSize, StreakGeometry> = {
     chevron: [8, 5],
     markTop: 0,
     axis: 'linear',
-    gridLines: 0,
+    gridLines: 'none',
   },
 };
 

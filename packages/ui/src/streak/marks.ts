@@ -47,9 +47,11 @@ export function brackets(before: StreakEstimate, { axis, geometry, palette }: Ma
 
 /** Results past the end of a fixed axis: a chevron at the edge and how many. */
 export function beyondMark(count: number, of: number, { geometry, palette }: MarkInput): string {
-  const { width, smearY } = geometry;
-  const text = `<text x="${width - 22}" y="${smearY + 4.5}" text-anchor="end" font-family="${palette.font}" font-size="13" fill="${palette.stoneInk}">${count} of ${of} beyond</text>`;
-  return `<path d="M${width - 14} ${smearY - 6}l6 6l-6 6" fill="none" stroke="${palette.stoneInk}" stroke-width="1.75"/>${geometry.height >= 100 ? text : ''}`;
+  const { width, smearY, smearHeight, height } = geometry;
+  const isLarge = height >= 100;
+  const y = isLarge ? smearY + smearHeight / 2 + 14 : smearY;
+  const text = `<text x="${width - 20}" y="${y + 4.5}" text-anchor="end" font-family="${palette.font}" font-size="13" fill="${palette.stoneInk}">${count} of ${of} beyond</text>`;
+  return `<path d="M${width - 14} ${y - 5}l5 5l-5 5" fill="none" stroke="${palette.stoneInk}" stroke-width="1.75"/>${isLarge ? text : ''}`;
 }
 
 function assayHead(by: AssayMark['by'], x: number, { geometry, palette }: MarkInput): string {

@@ -26,11 +26,20 @@ export function goldTicks(axisMaxG: number, count: number): number[] {
   return ticks(0, axisMaxG, count);
 }
 
+/** Grid of the small stones, whose axis carries no figures of its own. */
+const QUARTERS = [0.25, 0.5, 0.75];
+
 /** The linear gram axis of a single lot. */
-export function linearAxis(geometry: StreakGeometry, axisMaxG: number): StreakAxis {
-  const scale = scaleLinear([0, axisMaxG], [0, geometry.width]);
-  const grid = geometry.gridLines === 0 ? [] : goldTicks(axisMaxG, geometry.gridLines);
-  return { x: scale, grid: grid.filter((goldG) => goldG > 0 && goldG < axisMaxG).map(scale) };
+export function linearAxis({ width, gridLines }: StreakGeometry, axisMaxG: number): StreakAxis {
+  const scale = scaleLinear([0, axisMaxG], [0, width]);
+  if (gridLines === 'none') return { x: scale, grid: [] };
+  if (gridLines === 'quarters') return { x: scale, grid: QUARTERS.map((share) => share * width) };
+  return {
+    x: scale,
+    grid: goldTicks(axisMaxG, gridLines)
+      .filter((goldG) => goldG > 0 && goldG < axisMaxG)
+      .map(scale),
+  };
 }
 
 /** The list's axis: grade on a log scale, so that lots of any mass compare. `massG` turns gold into grade. */
