@@ -1,5 +1,6 @@
 import cookieParser from 'cookie-parser';
 import express, { type Express } from 'express';
+import { bidRoutes } from './features/bids/bids.routes.ts';
 import { clientPages } from './platform/client-pages.ts';
 import {
   brake,
@@ -21,7 +22,8 @@ import type { World } from './platform/world.ts';
 export function bindRoutes(world: World) {
   const { sessions, settings } = world;
   const routes = createRoutes({ sessions, upload: createUpload(), guard: refuseCrossSite(settings.PUBLIC_URL) });
-
+  const { on } = routes;
+  bidRoutes(on, world);
   return routes;
 }
 

@@ -1,4 +1,5 @@
 import { setTimeout as sleep } from 'node:timers/promises';
+import { closeLot, lapseUnderOffer, sweepLots } from './features/bids/close-lot.ts';
 import type { JobHandlers } from './platform/jobs.ts';
 import { createOutboxRunner, type OutboxHandler } from './platform/outbox.ts';
 import type { World } from './platform/world.ts';
@@ -9,13 +10,15 @@ export function outboxHandlers(_world: World): Record<string, OutboxHandler> {
 }
 
 /** What each job does when it rings. */
-export function jobHandlers(_world: World): JobHandlers {
+export function jobHandlers(world: World): JobHandlers {
   const nothing = async (): Promise<void> => {};
   return {
-    'lot.close': nothing,
-    'under-offer.lapse': nothing,
+    'lot.close': (lotId) => closeLot(world, lotId),
+    'under-offer.lapse': (offerId) => lapseUnderOffer(world, offerId),
     'deal.deadline': nothing,
-    sweep: nothing,
+    sweep: async () => {
+      await sweepLots(world);
+    },
     'prices.take': nothing,
     'payments.poll': nothing,
     'ledger.check': nothing,
