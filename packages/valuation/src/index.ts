@@ -12,3 +12,7 @@ export * from './components/piece-gold.ts';
 export * from './catalogue/catalogue.types.ts';
 export * from './catalogue/find-class.ts';
 export * from './catalogue/catalogue-2026-1.ts';
+export * from './lot/simulate-lot.ts';
+export * from './lot/summarise-lot.ts';
+export * from './lot/estimate-lot.ts';
+export * from './round-significant.ts';
