@@ -38,10 +38,14 @@ export function spreadOf(sorted: Float64Array): Spread {
 
 /** Mean and variance (divided by one less than the number of values, as in JCGM 101:2008, 7.6). */
 export function meanAndVariance(values: Float64Array): { mean: number; variance: number } {
+  const { length } = values;
   let sum = 0;
-  for (const value of values) sum += value;
-  const mean = sum / values.length;
+  for (let i = 0; i < length; i += 1) sum += values[i] as number;
+  const mean = sum / length;
   let squares = 0;
-  for (const value of values) squares += (value - mean) ** 2;
-  return { mean, variance: squares / (values.length - 1) };
+  for (let i = 0; i < length; i += 1) {
+    const off = (values[i] as number) - mean;
+    squares += off * off;
+  }
+  return { mean, variance: squares / (length - 1) };
 }

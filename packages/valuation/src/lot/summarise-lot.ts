@@ -56,7 +56,12 @@ function summariseLines({ plan, lines, goldG }: LotDraws): LineEstimate[] {
 
 /** Quantiles of gold over mass, draw by draw, in g/t; 0 where there is no mass. */
 function gradesOf(goldG: Float64Array, massG: Float64Array): Quantiles {
-  return quantilesOf(ascending(goldG.map((gold, i) => (massG[i] ? (gold / (massG[i] as number)) * 1e6 : 0))));
+  const grades = new Float64Array(goldG.length);
+  for (let i = 0; i < grades.length; i += 1) {
+    const mass = massG[i] as number;
+    if (mass > 0) grades[i] = ((goldG[i] as number) / mass) * 1e6;
+  }
+  return quantilesOf(ascending(grades));
 }
 
 function covariance(a: Float64Array, meanA: number, b: Float64Array, meanB: number): number {
