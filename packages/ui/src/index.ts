@@ -9,6 +9,7 @@ export { Field, FieldError, type FieldProps, type FieldWiring } from './field/Fi
 export { MoneyField, NumberField } from './field/FigureFields.tsx';
 export { Select, TextArea, TextField } from './field/TextField.tsx';
 export { AppBar } from './layout/AppBar.tsx';
+export { FormSteps, type FormStep } from './layout/FormSteps.tsx';
 export { Mark } from './layout/Mark.tsx';
 export { Page, PageHead } from './layout/Page.tsx';
 export { MeasureField, type MeasureEntry } from './measure-field/MeasureField.tsx';
@@ -16,6 +17,7 @@ export { parseMeasure, type Measure } from './measure-field/parse-measure.ts';
 export { parseMoneyMinor, parseNumber, type ParsedNumber } from './measure-field/parse-number.ts';
 export { findUnit, unitsOf, type MeasureKind, type MeasureUnit } from './measure-field/units.ts';
 export { FactList, Pager, type Fact } from './sheet/Facts.tsx';
+export { DoubtBar, Reading } from './sheet/Reading.tsx';
 export { EmptyState, Notice, Skeleton, StatusStrip } from './sheet/Notice.tsx';
 export * from './streak/index.ts';
 export * from './text/index.ts';

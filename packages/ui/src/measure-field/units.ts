@@ -29,8 +29,8 @@ const units: Record<MeasureKind, readonly MeasureUnit[]> = {
     { id: 'kg', label: 'kg', perUnit: 1000, aliases: ['kilo', 'kilos', 'kgs', 'kilogram', 'kilograms'], echo: 'lb' },
     g,
     { id: 'lb', label: 'lb', perUnit: G_PER_LB, aliases: ['lbs', 'pound', 'pounds', 'lb.'], echo: 'kg' },
-    { id: 'oz', label: 'oz, avoirdupois', perUnit: G_PER_LB / 16, aliases: ['ounce', 'ounces', 'oz.'], echo: 'g' },
-    { ...ozt, label: 'ozt, troy' },
+    { id: 'oz', label: 'oz (avdp)', perUnit: G_PER_LB / 16, aliases: ['ounce', 'ounces', 'oz.'], echo: 'g' },
+    { ...ozt, label: 'ozt (troy)' },
   ],
   gold: [
     { ...g, echo: 'ozt' },

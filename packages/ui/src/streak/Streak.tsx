@@ -184,7 +184,7 @@ function Stone({ id, width, title, description, ...props }: StoneProps) {
           limitG={props.assayLimitG ?? null}
         />
       )}
-      {pastG.length > 0 && <PastAssays axisMaxG={axisMaxG} goldG={pastG} />}
+      {pastG.length > 0 && <PastAssays axisMaxG={axisMaxG} width={width} goldG={pastG} />}
     </>
   );
 }

@@ -79,17 +79,22 @@ export function GoldAxis({ axisMaxG, isWide }: Omit<ScaleProps, 'width'>) {
   );
 }
 
+/** Width of the words before the ticks, px; ticks that would meet them go on a line of their own. */
+const PAST_LABEL_PX = 290;
+
 interface PastAssaysProps {
   axisMaxG: number;
+  width: number;
   goldG: readonly number[];
 }
 
 /** Past assays of like lots, scaled to this lot's mass: the reference class beside the estimate. */
-export function PastAssays({ axisMaxG, goldG }: PastAssaysProps) {
+export function PastAssays({ axisMaxG, width, goldG }: PastAssaysProps) {
   const label = `${goldG.length} past ${goldG.length === 1 ? 'assay' : 'assays'} of like lots, at this mass`;
   const shown = goldG.filter((one) => one <= axisMaxG);
+  const isUnderLabel = Math.min(...shown, axisMaxG) * (width / axisMaxG) < PAST_LABEL_PX;
   return (
-    <div className="past-assays">
+    <div className={isUnderLabel ? 'past-assays past-assays-apart' : 'past-assays'}>
       <span>{label}</span>
       {shown.map((one, i) => (
         <i key={i} aria-hidden="true" style={{ left: `${(one / axisMaxG) * 100}%` }} />
