@@ -21,11 +21,11 @@ export function ascending(values: Float64Array): Float64Array {
   return sorted;
 }
 
-/** For each value a bucket number that never falls when the value rises; null when they would all share one. */
+/** For each value a bucket number that never falls when the value rises; null when they would all share one or one is negative. */
 function bucketKeys(values: Float64Array): Int32Array | null {
   const { length } = values;
   const [least, most] = limits(values);
-  if (!(most > least)) return null;
+  if (!(most > least && least >= 0)) return null;
   const keys = new Int32Array(length);
   if (most < 4 * least) {
     const scale = (length - 1) / (most - least);
