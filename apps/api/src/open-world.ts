@@ -11,7 +11,11 @@ import type { Settings } from './settings.ts';
 /** Connects to everything outside the process, for the API, the worker and the commands alike. */
 export async function openWorld(settings: Settings): Promise<World & { close(): Promise<void> }> {
   const log = createLog(settings);
-  const db = await createDataSource(settings.DATABASE_URL, { poolSize: settings.DATABASE_POOL }).initialize();
+  const db = await createDataSource(settings.DATABASE_URL, {
+    zone: settings.MARKET_ZONE,
+    currency: settings.MARKET_CURRENCY,
+    poolSize: settings.DATABASE_POOL,
+  }).initialize();
   const mail = createMailer(settings);
   return {
     settings,

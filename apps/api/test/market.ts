@@ -77,7 +77,11 @@ export async function openMarket({ payments = () => noPayments, env = {} }: Opti
   const database = await copyDatabase();
   const folder = await mkdtemp(join(tmpdir(), 'lydite-test-'));
   const settings = testSettings({ DATABASE_URL: database.appUrl, FILES_DIR: folder, ...env });
-  const db = await createDataSource(database.appUrl, { poolSize: 20 }).initialize();
+  const db = await createDataSource(database.appUrl, {
+    zone: settings.MARKET_ZONE,
+    currency: settings.MARKET_CURRENCY,
+    poolSize: 20,
+  }).initialize();
   const owner = new pg.Client({ connectionString: database.ownerUrl });
   await owner.connect();
   const mails: Mail[] = [];

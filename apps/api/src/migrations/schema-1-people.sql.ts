@@ -111,6 +111,8 @@ create table fee_schedules (
   buyer_fee_bp integer not null check (buyer_fee_bp between 0 and 10000),
   seller_fee_bp integer not null check (seller_fee_bp between 0 and 10000)
 );
+-- the fees of rules.md: in force until a dated change
+insert into fee_schedules (from_day, buyer_fee_bp, seller_fee_bp) values ('2000-01-01', 200, 400);
 
 create table catalogue_versions (
   version text primary key,

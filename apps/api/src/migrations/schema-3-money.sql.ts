@@ -20,7 +20,10 @@ create table deals (
   hold_minor bigint not null check (hold_minor between 1 and 99999999),
   -- the deadline that runs now and what it is for; null when none runs
   due_kind text,
+  due_from timestamptz,
   due_at timestamptz,
+  -- the deadline stands still since then: a bank debit is on its way
+  due_paused_at timestamptz,
   awarded_at timestamptz not null default market_now(),
   paid_at timestamptz,
   carrier text,
@@ -37,7 +40,7 @@ create table deals (
 create unique index deals_live_lot_key on deals (lot_id) where state <> 'cancelled';
 create index deals_seller_idx on deals (seller_id, updated_at desc);
 create index deals_buyer_idx on deals (buyer_id, updated_at desc);
-create index deals_due_idx on deals (due_at) where due_at is not null and frozen_at is null;
+create index deals_due_idx on deals (due_at) where due_at is not null and frozen_at is null and due_paused_at is null;
 
 alter table photos add constraint photos_deal_fk foreign key (deal_id) references deals;
 
@@ -60,6 +63,8 @@ create table weigh_ins (
   scale_resolution_g numeric(12, 4) not null check (scale_resolution_g > 0),
   scale_serial text not null,
   note text not null,
+  photo_ids uuid[] not null default '{}',
+  -- null when nobody weighed in time and the declared mass stands
   entered_by uuid references members,
   at timestamptz not null default market_now(),
   countersigned_at timestamptz,
@@ -124,6 +129,7 @@ create table settlements (
   paid_in_minor bigint not null,
   seller_gets_minor bigint not null check (seller_gets_minor >= 0),
   refund_minor bigint not null check (refund_minor >= 0),
+  adjustment_minor bigint not null check (adjustment_minor >= 0),
   steps jsonb not null,
   hash text not null,
   at timestamptz not null default market_now(),

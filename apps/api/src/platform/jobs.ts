@@ -64,7 +64,7 @@ export async function startJobs({ url, log, handlers }: { url: string; log: Log;
 
   const ring: OutboxHandler = async ({ payload }) => {
     const { job, objectId, at } = payload as { job: JobName; objectId: string; at: string };
-    await boss.send(job, { objectId }, { startAfter: new Date(at), singletonKey: objectId });
+    await boss.send(job, { objectId }, { startAfter: new Date(at), singletonKey: `${objectId}@${at}` });
   };
   return { ring, stop: () => boss.stop({ graceful: true, timeout: 5000 }) };
 }
