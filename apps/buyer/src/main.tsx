@@ -1,0 +1,5 @@
+import { mountApp } from '@lydite/client';
+import { routes } from './routes.tsx';
+import './styles.css';
+
+mountApp({ app: 'buyer', roleWord: 'Buyer', basename: '/', nav: [{ to: '/', label: 'Lots', end: true }], routes });

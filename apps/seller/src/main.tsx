@@ -1,0 +1,11 @@
+import { mountApp } from '@lydite/client';
+import { routes } from './routes.tsx';
+import './styles.css';
+
+mountApp({
+  app: 'seller',
+  roleWord: 'Seller',
+  basename: '/sell',
+  nav: [{ to: '/', label: 'My lots', end: true }],
+  routes,
+});

@@ -1,0 +1,40 @@
+import { Page } from '@lydite/ui';
+import { isRouteErrorResponse, Link, useRouteError } from 'react-router-dom';
+import { isApiError } from '../call/api-error.ts';
+import { useTitle } from './use-title.ts';
+
+/** What a page shows that could not be shown. */
+export function ErrorPage() {
+  const error = useRouteError();
+  if (isApiError(error) && error.status === 404) return <NotFoundPage />;
+  if (isRouteErrorResponse(error) && error.status === 404) return <NotFoundPage />;
+  return <FailedPage error={error} />;
+}
+
+function FailedPage({ error }: { error: unknown }) {
+  useTitle('Something went wrong');
+  const known = isApiError(error);
+  return (
+    <Page shape="narrow">
+      <h1>{known && error.code === 'network' ? 'The market cannot be reached' : 'Something went wrong'}</h1>
+      <p className="mt-4">{known ? error.message : 'This page could not be shown. Nothing you entered was lost.'}</p>
+      <p className="actions">
+        <button type="button" className="btn" onClick={() => location.reload()}>
+          Try again
+        </button>
+      </p>
+    </Page>
+  );
+}
+
+export function NotFoundPage() {
+  useTitle('Not found');
+  return (
+    <Page shape="narrow">
+      <h1>There is nothing at this address</h1>
+      <p className="mt-4">
+        It may have been removed, or it belongs to somebody else. <Link to="/">Go to the start</Link>
+      </p>
+    </Page>
+  );
+}

@@ -1,0 +1,97 @@
+import { AppBar } from '@lydite/ui';
+import { useQuery } from '@tanstack/react-query';
+import { useEffect, useRef, useState } from 'react';
+import { Link, NavLink, Outlet, ScrollRestoration, useLocation } from 'react-router-dom';
+import { sessionQuery } from '../session/session.queries.ts';
+import { onAnnouncement } from './announce.ts';
+import { clientsOf, type ClientApp } from './client-app.ts';
+import { MemberMenu } from './MemberMenu.tsx';
+import { PasswordDialog } from './PasswordDialog.tsx';
+
+/** The frame of every page: bar, content, the one status node, the password dialog. */
+export function Shell({ app, roleWord, nav }: Pick<ClientApp, 'app' | 'roleWord' | 'nav'>) {
+  const { data: session } = useQuery(sessionQuery);
+  const member = session?.member ?? null;
+  const signedIn = member && nav.length > 0;
+  useFocusOnNavigation();
+  return (
+    <>
+      <AppBar
+        app={app}
+        role={roleWord}
+        home={(mark) => (
+          <Link to="/" className="mark">
+            {mark}
+          </Link>
+        )}
+        nav={
+          signedIn || app === 'buyer'
+            ? nav
+                .filter(({ to }) => member !== null || to === '/')
+                .map(({ to, label, end }) => (
+                  <NavLink key={to} to={to} end={end ?? false}>
+                    {label}
+                  </NavLink>
+                ))
+            : undefined
+        }
+        end={
+          member ? (
+            <MemberMenu
+              member={member}
+              unread={session?.unreadNotices ?? 0}
+              others={clientsOf.filter(
+                (one) => one.app !== app && one.roles.some((role) => member.roles.includes(role)),
+              )}
+            />
+          ) : (
+            session && <VisitorLinks />
+          )
+        }
+      />
+      <Outlet />
+      <Status />
+      <PasswordDialog />
+      <ScrollRestoration />
+    </>
+  );
+}
+
+function VisitorLinks() {
+  const { pathname, search } = useLocation();
+  const next =
+    pathname.startsWith('/sign-in') || pathname.startsWith('/register')
+      ? ''
+      : `?next=${encodeURIComponent(pathname + search)}`;
+  return (
+    <>
+      <Link to={`/sign-in${next}`}>Sign in</Link>
+      <Link to="/register">Register</Link>
+    </>
+  );
+}
+
+function Status() {
+  const [text, setText] = useState('');
+  useEffect(() => onAnnouncement(setText), []);
+  return (
+    <div role="status" className="sr-only">
+      {text}
+    </div>
+  );
+}
+
+/** After a change of page the title gets the focus, so that a keyboard goes on from there and a reader hears where it is. */
+function useFocusOnNavigation(): void {
+  const { pathname } = useLocation();
+  const first = useRef(true);
+  useEffect(() => {
+    if (first.current) {
+      first.current = false;
+      return;
+    }
+    const title = document.querySelector<HTMLElement>('main h1');
+    title?.setAttribute('tabindex', '-1');
+    title?.focus({ preventScroll: true });
+  }, [pathname]);
+}
