@@ -7,7 +7,7 @@ import { isTaken } from './lib/lock.mjs';
 import { Refusal, runScript } from './lib/main.mjs';
 import { ensurePackages } from './lib/packages.mjs';
 import { fromRoot, localDir, root } from './lib/root.mjs';
-import { Stack } from './stack.mjs';
+import { Stack } from './stack/stack.mjs';
 
 const usage = `Runs one of the API's commands against the local stack; starts what it needs when Lydite does not run.
 

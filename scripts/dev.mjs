@@ -7,7 +7,7 @@ import { fromRoot, localDir } from './lib/root.mjs';
 import { waitForAnswer } from './lib/services.mjs';
 import { createSteps, secondsSince } from './lib/steps.mjs';
 import { untilStopped } from './lib/until-stopped.mjs';
-import { Stack } from './stack.mjs';
+import { Stack } from './stack/stack.mjs';
 import { welcome } from './stack/welcome.mjs';
 
 const usage = `Starts Lydite from its sources: the clients reload, the API and the worker restart when a file changes.

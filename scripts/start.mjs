@@ -6,7 +6,7 @@ import { assertNodeVersion, ensurePackages } from './lib/packages.mjs';
 import { localDir } from './lib/root.mjs';
 import { createSteps, secondsSince } from './lib/steps.mjs';
 import { untilStopped } from './lib/until-stopped.mjs';
-import { Stack } from './stack.mjs';
+import { Stack } from './stack/stack.mjs';
 import { welcome } from './stack/welcome.mjs';
 
 const usage = `Starts the whole of Lydite with its demo market and prints its address. Ctrl-C stops everything.

@@ -3,7 +3,7 @@ import { installDebianPackages } from '../lib/apt.mjs';
 import { ensureBuilds } from '../lib/build.mjs';
 import { fromRoot } from '../lib/root.mjs';
 import { createSteps } from '../lib/steps.mjs';
-import { Stack } from '../stack.mjs';
+import { Stack } from '../stack/stack.mjs';
 import { runCheck } from './run-check.mjs';
 
 const dir = fromRoot('.local/e2e');

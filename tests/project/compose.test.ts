@@ -35,22 +35,32 @@ describe('compose.yaml', () => {
     }
   });
 
-  it.each(services)('%s: paths, volumes, images and neighbours exist', (_name, service) => {
-    const { build, volumes = [], depends_on: neighbours = {} } = service;
-    if (build) {
-      expect(build.context).toBe('..');
-      expect(inRoot(build.dockerfile)).toBe(true);
-      expect(stages()).toContain(build.target);
-    }
-    if (service.image?.startsWith('lydite-')) {
-      expect(services.some(([, { image, build: built }]) => built && image === service.image)).toBe(true);
-    }
+  it.each(services.filter(([, { build }]) => build))(
+    '%s: is built from a stage of the Dockerfile',
+    (_name, service) => {
+      expect(service.build?.context).toBe('..');
+      expect(service.build?.dockerfile).toBe('docker/Dockerfile');
+      expect(stages()).toContain(service.build?.target);
+    },
+  );
+
+  it('uses only images that are built here or published', () => {
+    const own = services.map(([, { image }]) => image ?? '').filter((image) => image.startsWith('lydite-'));
+    const built = services.filter(([, { build }]) => build).map(([, { image }]) => image);
+    expect(new Set(own)).toEqual(new Set(built));
+  });
+
+  it.each(services)('%s: what it mounts exists', (_name, { volumes = [] }) => {
     for (const [source = ''] of volumes.map((volume) => volume.split(':'))) {
-      expect(source.startsWith('./') ? inRoot(join('docker', source)) : source in compose.volumes, source).toBe(true);
+      const exists = source.startsWith('./') ? inRoot(join('docker', source)) : source in compose.volumes;
+      expect(exists, source).toBe(true);
     }
-    for (const [name, { condition }] of Object.entries(neighbours)) {
+  });
+
+  it.each(services)('%s: waits only for services that can tell how they are', (_name, service) => {
+    for (const [name, { condition }] of Object.entries(service.depends_on ?? {})) {
       expect(compose.services).toHaveProperty(name);
-      if (condition === 'service_healthy') expect(compose.services[name]?.healthcheck).toBeDefined();
+      expect('healthcheck' in (compose.services[name] ?? {}), name).toBe(condition === 'service_healthy');
     }
   });
 
@@ -95,7 +105,7 @@ describe('the environment', () => {
   it('PostgreSQL: the passwords are those the script of roles reads', () => {
     const passwords = Object.keys(environmentOf('postgres')).filter((name) => !name.startsWith('POSTGRES_'));
     const read = [...readDocker('postgres/database.sql').matchAll(/^\\getenv \w+ (\w+)$/gm)].map(([, name]) => name);
-    expect(passwords.sort()).toEqual(read.sort());
+    expect(new Set(passwords)).toEqual(new Set(read));
   });
 
   it('only migrations and seed get the connection of the owner', () => {
@@ -105,7 +115,8 @@ describe('the environment', () => {
 
   it('example.env holds no variable that nothing uses', () => {
     const text = readDocker('compose.yaml');
-    for (const name of Object.keys(example)) expect(text, name).toMatch(new RegExp(`\\b${name}\\b`));
+    const own = Object.keys(example).filter((name) => !name.startsWith('COMPOSE_'));
+    for (const name of own) expect(text, name).toMatch(new RegExp(`\\b${name}\\b`));
   });
 
   it('the proxy asks the API by its name and port', () => {

@@ -1,17 +1,17 @@
 import { rmSync } from 'node:fs';
 import { join } from 'node:path';
-import { runCommand } from './lib/commands.mjs';
-import { takeLock } from './lib/lock.mjs';
-import { ensureDir } from './lib/root.mjs';
-import { readOrMakeSecrets, writeSecrets } from './lib/secrets.mjs';
-import { startService, waitForAnswer } from './lib/services.mjs';
-import { ensureWebhooks } from './lib/webhooks.mjs';
-import { isRunning, openCluster, startCluster, stopCluster } from './postgres/cluster.mjs';
-import { databaseUrls } from './postgres/database.mjs';
-import * as environments from './stack/environment.mjs';
-import { openMarket, seedOnce } from './stack/market.mjs';
-import { choosePorts } from './stack/ports.mjs';
-import { programsOf } from './stack/programs.mjs';
+import { runCommand } from '../lib/commands.mjs';
+import { takeLock } from '../lib/lock.mjs';
+import { ensureDir } from '../lib/root.mjs';
+import { readOrMakeSecrets, writeSecrets } from '../lib/secrets.mjs';
+import { startService, waitForAnswer } from '../lib/services.mjs';
+import { ensureWebhooks } from '../lib/webhooks.mjs';
+import { isRunning, openCluster, startCluster, stopCluster } from '../postgres/cluster.mjs';
+import { databaseUrls } from '../postgres/database.mjs';
+import * as environments from './environment.mjs';
+import { openMarket, seedOnce } from './market.mjs';
+import { choosePorts } from './ports.mjs';
+import { programsOf } from './programs.mjs';
 
 /**
  * A whole Lydite on this machine: PostgreSQL, the stand-ins, the API and its worker, in a folder of its own.
