@@ -1,5 +1,5 @@
 import type { Estimate } from '../types.ts';
-import { meanAndVariance, sortedQuantile } from './quantiles.ts';
+import { meanAndVariance, quantilesOf, sortedQuantile } from './quantiles.ts';
 
 const bins = 96;
 
@@ -10,7 +10,7 @@ const bins = 96;
  * @returns probability per gram; all zero when the draws have no spread
  */
 export function densityOf(sorted: Float64Array): Estimate['density'] {
-  const [fromG, toG] = [sortedQuantile(sorted, 0.0015), sortedQuantile(sorted, 0.9985)];
+  const { p0_15: fromG, p99_85: toG } = quantilesOf(sorted);
   const widthG = (toG - fromG) / bins;
   if (!(widthG > 0)) return { fromG, toG, perG: new Array<number>(bins).fill(0) };
   const counts = countBins(sorted, fromG, widthG);

@@ -10,11 +10,18 @@ export interface PlanDraws {
   lines: { goldG: Float64Array; massG: Float64Array; components: Float64Array[] }[];
 }
 
+interface DrawOptions {
+  seed: number;
+  draws: number;
+  keys?: readonly string[];
+}
+
 /**
  * Draws a plan: the i-th entries of all arrays belong to one possible truth about the lot.
- * @param options seed, any integer; draws, at least 100
+ * @param options seed, any integer; draws, at least 100; keys, whose figures take the first coordinates in this order, so that
+ * two plans drawn with the same keys differ only where the plans do
  */
-export function drawPlan(plan: LotPlan, options: { seed: number; draws: number }): PlanDraws {
+export function drawPlan(plan: LotPlan, options: DrawOptions): PlanDraws {
   const { draws } = options;
   const columnOf = createColumns(options);
   const lines = plan.lines.map(({ mass, gold }) => {
@@ -36,9 +43,9 @@ export function drawPlan(plan: LotPlan, options: { seed: number; draws: number }
 }
 
 /** Hands each factor its coordinate; the same key, the same coordinate. */
-function createColumns({ seed, draws }: { seed: number; draws: number }): (factor: Factor) => Column {
+function createColumns({ seed, draws, keys = [] }: DrawOptions): (factor: Factor) => Column {
   const coordinate = createLattice(seed, draws);
-  const columns = new Map<string, Column>();
+  const columns = new Map(keys.map((key, index) => [key, coordinate(index)]));
   return ({ key }) => {
     const column = columns.get(key) ?? coordinate(columns.size);
     columns.set(key, column);

@@ -26,7 +26,7 @@ export interface DriverInput {
 export function driversOf(given: DriverInput): Driver[] {
   const { plan, seed, quantiles } = given;
   const nowG: [number, number] = [quantiles.p10, quantiles.p90];
-  const now = rangeOf(plan, seed);
+  const now = rangeOf(plan, seed, keysOf(plan));
   const expect = createExpectation(given);
   const shares = varianceShares(plan).filter(({ share }) => share >= leastShare);
   return shares.slice(0, mostDrivers).map((each) => {
@@ -46,6 +46,7 @@ export function driversOf(given: DriverInput): Driver[] {
 /** The measurement for a figure and the range expected after it; figures that one measurement answers share its range. */
 function createExpectation({ input, catalogue, plan, seed, lines: estimates }: DriverInput) {
   const known = new Map<string, [number, number]>();
+  const keys = keysOf(plan);
   return ({ factor }: FactorShare) => {
     const lines = plan.lines.filter(({ gold }) =>
       gold.some((term) => term.factors.some(({ key }) => key === factor.key)),
@@ -55,13 +56,18 @@ function createExpectation({ input, catalogue, plan, seed, lines: estimates }: D
     const question = measurement.ask(lines.length === 1 ? first.label : `the ${first.materialClass.unit.many}`);
     const after =
       known.get(question) ??
-      rangeOf(planLot(improveLot(input, measurement, lines, factor, estimates), catalogue), seed);
+      rangeOf(planLot(improveLot(input, measurement, lines, factor, estimates), catalogue), seed, keys);
     known.set(question, after);
     return { question, lines, after };
   };
 }
 
-function rangeOf(plan: LotPlan, seed: number): [number, number] {
-  const sorted = ascending(drawPlan(plan, { seed, draws }).goldG);
+function rangeOf(plan: LotPlan, seed: number, keys: readonly string[]): [number, number] {
+  const sorted = ascending(drawPlan(plan, { seed, draws, keys }).goldG);
   return [sortedQuantile(sorted, 0.1), sortedQuantile(sorted, 0.9)];
+}
+
+/** The figures of a lot, each once. */
+function keysOf(plan: LotPlan): string[] {
+  return [...new Set(plan.lines.flatMap(({ gold }) => gold.flatMap(({ factors }) => factors.map(({ key }) => key))))];
 }

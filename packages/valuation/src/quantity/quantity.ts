@@ -32,7 +32,8 @@ export function about(value: number, halfWidth: number): Quantity {
 
 /** `value` within plus or minus `share` of it, equally likely. */
 export function within(value: number, share: number): Quantity {
-  return share === 0 ? exact(value) : uniform(value * (1 - share), value * (1 + share));
+  const half = value * share;
+  return half === 0 ? exact(value) : uniform(value - half, value + half);
 }
 
 /**
