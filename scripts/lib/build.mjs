@@ -36,7 +36,7 @@ async function build({ target, logDir }) {
     command: process.execPath,
     args: [join(root, 'node_modules/vite/bin/vite.js'), 'build', '--logLevel', 'warn'],
     cwd: fromRoot(target.folder),
-    env: { ...process.env, NODE_ENV: 'production' },
+    env: { ...process.env, NODE_ENV: 'production', NO_COLOR: '1' },
     logFile: join(logDir, `build-${target.folder.replaceAll('/', '-')}.log`),
     what: `Building ${target.folder}`,
   });
