@@ -7,12 +7,19 @@ export interface Running {
   close: () => Promise<void>;
 }
 
-/** Listens on all addresses, so that containers reach each other; port 0 takes a free one. Rejects when taken. */
-export async function listen(handler: RequestListener, port: number): Promise<Running> {
+/** Where a stand-in listens: this machine only, unless its host says otherwise, as containers need. */
+export interface Listening {
+  /** 0 takes a free port. */
+  port: number;
+  host?: string | undefined;
+}
+
+/** Starts an HTTP server; rejects when the port is taken. */
+export async function listen(handler: RequestListener, { port, host = '127.0.0.1' }: Listening): Promise<Running> {
   const server = createServer(handler);
   await new Promise<void>((resolve, reject) => {
     server.once('error', reject);
-    server.listen(port, resolve);
+    server.listen(port, host, resolve);
   });
   return {
     port: (server.address() as AddressInfo).port,

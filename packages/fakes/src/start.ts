@@ -12,6 +12,8 @@ const environment = z.object({
   MAIL_SMTP_PORT: port(4402),
   MAIL_HTTP_PORT: port(4403),
   PRICES_PORT: port(4404),
+  /** The address to listen on: this machine only by default. */
+  FAKES_HOST: z.string().default('127.0.0.1'),
   /** Folder of everything that outlives a restart. */
   FAKES_DIR: z.string().min(1),
   /** Where a browser reaches the processor's pages; by default localhost and the port. */
@@ -22,9 +24,11 @@ const environment = z.object({
 });
 
 const settings = environment.parse(process.env);
+const host = settings.FAKES_HOST;
 mkdirSync(settings.FAKES_DIR, { recursive: true });
 
 const payments = await startPayments({
+  host,
   port: settings.PAYMENTS_PORT,
   dir: join(settings.FAKES_DIR, 'payments'),
   publicUrl: settings.FAKES_PUBLIC_URL,
@@ -32,11 +36,12 @@ const payments = await startPayments({
   payoutDelayS: settings.FAKES_PAYOUT_DELAY_S,
 });
 const mail = await startMail({
+  host,
   smtpPort: settings.MAIL_SMTP_PORT,
   httpPort: settings.MAIL_HTTP_PORT,
   dir: join(settings.FAKES_DIR, 'mail'),
 });
-const prices = await startPrices({ port: settings.PRICES_PORT });
+const prices = await startPrices({ host, port: settings.PRICES_PORT });
 
 const ports = { payments: payments.port, mailSmtp: mail.smtpPort, mailHttp: mail.port, prices: prices.port };
 process.stdout.write(`${JSON.stringify({ ready: true, ...ports })}\n`);

@@ -1,7 +1,7 @@
 import express, { type Response, type Router } from 'express';
 import { html, type Html } from '../pages/html.ts';
 import { sendPage } from '../pages/page.ts';
-import type { Mail, Mailbox } from './mailbox.ts';
+import { WEB_ADDRESS, type Mail, type Mailbox } from './mailbox.ts';
 
 /** The catcher's JSON API and its readable pages. */
 export function createMailPages(mailbox: Mailbox): Router {
@@ -68,9 +68,8 @@ function sendList(res: Response, mailbox: Mailbox, to: string): void {
 
 /** Text with its addresses as links; everything else is escaped by the template. */
 function linked(text: string): Html[] {
-  return text
-    .split(/(https?:\/\/[^\s<>"')\]]+)/)
-    .map((part, index) => (index % 2 === 1 ? html`<a href="${part}">${part}</a>` : html`${part}`));
+  const parts = text.split(new RegExp(`(${WEB_ADDRESS.source})`));
+  return parts.map((part, index) => (index % 2 === 1 ? html`<a href="${part}">${part}</a>` : html`${part}`));
 }
 
 function sendMail(res: Response, mail: Mail | undefined): void {

@@ -17,6 +17,9 @@ export interface Mail {
   headers: Record<string, string>;
 }
 
+/** An http address as people write it: a full stop or bracket after it is not part of it. */
+export const WEB_ADDRESS = /https?:\/\/[^\s"'<>)\]]*[^\s"'<>)\].,;:!?]/g;
+
 export type Mailbox = ReturnType<typeof openMailbox>;
 
 /** Keeps mails as one JSON file each, so that they outlive a restart. */
@@ -65,7 +68,7 @@ async function toMail(raw: Buffer, { envelopeTo, id }: { envelopeTo: string[]; i
   const parsed = await simpleParser(raw);
   const markup = parsed.html || null;
   const text = parsed.text ?? '';
-  const found = `${text}\n${markup?.replaceAll('&amp;', '&') ?? ''}`.match(/https?:\/\/[^\s"'<>)\]]+/g) ?? [];
+  const found = `${text}\n${markup?.replaceAll('&amp;', '&') ?? ''}`.match(WEB_ADDRESS) ?? [];
   return {
     id,
     at: new Date().toISOString(),
@@ -74,7 +77,7 @@ async function toMail(raw: Buffer, { envelopeTo, id }: { envelopeTo: string[]; i
     subject: parsed.subject ?? '(no subject)',
     text,
     html: markup,
-    links: [...new Set(found.map((link) => link.replace(/[.,;]+$/, '')))],
+    links: [...new Set(found)],
     headers: Object.fromEntries(
       parsed.headerLines.map(({ key, line }) => [key, line.slice(line.indexOf(':') + 1).trim()]),
     ),

@@ -9,6 +9,7 @@ export interface MailOptions {
   /** 0 takes a free port. */
   smtpPort: number;
   httpPort: number;
+  host?: string | undefined;
   /** Folder the mails are kept in; made when missing. */
   dir: string;
 }
@@ -19,16 +20,16 @@ export interface RunningMail extends Running {
 }
 
 /** Starts the mail catcher: takes every mail by SMTP without a password and shows it. */
-export async function startMail({ smtpPort, httpPort, dir }: MailOptions): Promise<RunningMail> {
+export async function startMail({ smtpPort, httpPort, host = '127.0.0.1', dir }: MailOptions): Promise<RunningMail> {
   const mailbox = openMailbox(dir);
   const smtp = createSmtp(mailbox);
   await new Promise<void>((resolve, reject) => {
     smtp.once('error', reject);
-    smtp.listen(smtpPort, () => resolve());
+    smtp.listen(smtpPort, host, () => resolve());
   });
   smtp.on('error', (error) => process.stderr.write(`Mail: ${error.message}\n`));
   const app = express().disable('x-powered-by').use(createMailPages(mailbox));
-  const pages = await listen(app, httpPort);
+  const pages = await listen(app, { port: httpPort, host });
   return {
     port: pages.port,
     smtpPort: (smtp.server.address() as AddressInfo).port,

@@ -47,6 +47,8 @@ dd{margin:0;overflow-wrap:anywhere}
 `;
 
 const styleHash = createHash('sha256').update(style).digest('base64');
+/** Written without a template around it: one more space inside and browsers refuse it. */
+const styleElement = new Html(`<style>${style}</style>`);
 
 interface PageInput {
   /** Whose page this is, shown on top. */
@@ -82,9 +84,7 @@ export function sendPage(
         <meta name="robots" content="noindex" />
         <link rel="icon" href="data:," />
         <title>${title} – ${owner}</title>
-        <style>
-          ${new Html(style)}
-        </style>
+        ${styleElement}
       </head>
       <body>
         <header>${owner}<small>${note}</small></header>

@@ -29,7 +29,7 @@ export function expand(work: Work, answer: object, paths: string[]): object {
 
 function expandPath(work: Work, branch: Branch, [key, ...rest]: string[], whole: string): Branch {
   if (key === undefined) return branch;
-  const value = branch[key] ?? includable(work, branch, key);
+  const value = key in branch ? branch[key] : includable(work, branch, key);
   if (value === undefined)
     throw badParameter('parameter_invalid', `This property cannot be expanded (${whole}).`, 'expand');
   if (Array.isArray(value)) {

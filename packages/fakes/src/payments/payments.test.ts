@@ -1,6 +1,6 @@
 import Stripe from 'stripe';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
-import { startTestMarket, type TestMarket } from './test-market.ts';
+import { failure, startTestMarket, type TestMarket } from './test-market.ts';
 
 let market: TestMarket;
 beforeAll(async () => void (market = await startTestMarket()));
@@ -201,10 +201,3 @@ describe('lists and expansion', () => {
     expect(wrong.statusCode).toBe(400);
   });
 });
-
-async function failure(promise: Promise<unknown>) {
-  return promise.then(
-    () => Promise.reject(new Error('The request succeeded.')),
-    (error: Stripe.errors.StripeError & { payment_intent?: Stripe.PaymentIntent; charge?: string }) => error,
-  );
-}

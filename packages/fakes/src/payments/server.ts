@@ -4,14 +4,12 @@ import { createControl, sendControlError } from './control.ts';
 import { createDeliveries } from './deliveries.ts';
 import { createHostedPages } from './hosted/hosted-pages.ts';
 import { createKeyedAnswers } from './idempotency.ts';
-import { listen, type Running } from '../listen.ts';
+import { listen, type Listening, type Running } from '../listen.ts';
 import { Store } from './store.ts';
 import { runDueTasks } from './tasks.ts';
 import type { PaymentsSettings } from './work.ts';
 
-export interface PaymentsOptions extends Partial<PaymentsSettings> {
-  /** 0 takes a free port. */
-  port: number;
+export interface PaymentsOptions extends Listening, Partial<PaymentsSettings> {
   /** Folder of the journal; made when missing. */
   dir: string;
 }
@@ -25,7 +23,7 @@ const TICK_MS = 250;
 export async function startPayments(options: PaymentsOptions): Promise<Running> {
   const store = new Store(options.dir);
   const app = express();
-  const running = await listen(app, options.port);
+  const running = await listen(app, options);
   const settings: PaymentsSettings = {
     publicUrl: (options.publicUrl ?? `http://localhost:${running.port}`).replace(/\/$/, ''),
     fundsDelayS: options.fundsDelayS ?? 15,

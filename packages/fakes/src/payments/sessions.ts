@@ -1,8 +1,8 @@
 import type { Stripe } from 'stripe';
 import { emit } from './events.ts';
 import { idOf } from './ids.ts';
-import { attempt, createIntent, failDebit, refuseAtBank, succeed } from './intents.ts';
-import { cancelIntent } from './resources/payment-intents.ts';
+import { attempt, failDebit, refuseAtBank, succeed } from './attempts.ts';
+import { cancelIntent, createIntent } from './intents.ts';
 import { testMethod } from './test-methods.ts';
 import { mustFind, type Work } from './work.ts';
 

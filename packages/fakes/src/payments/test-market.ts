@@ -87,3 +87,20 @@ export async function startReceiver(statuses: number[] = []) {
     close: () => new Promise<void>((resolve) => server.close(() => resolve()).closeAllConnections()),
   };
 }
+
+/** Waits until a condition holds. @throws after five seconds */
+export async function until(holds: () => boolean | Promise<boolean>): Promise<void> {
+  const endMs = Date.now() + 5_000;
+  while (!(await holds())) {
+    if (Date.now() > endMs) throw new Error('Waited five seconds in vain.');
+    await new Promise((resolve) => setTimeout(resolve, 20));
+  }
+}
+
+/** The error of a request that is expected to fail. */
+export async function failure(promise: Promise<unknown>) {
+  return promise.then(
+    () => Promise.reject(new Error('The request succeeded.')),
+    (error: Stripe.errors.StripeError & { payment_intent?: Stripe.PaymentIntent; charge?: string }) => error,
+  );
+}

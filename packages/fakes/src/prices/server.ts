@@ -1,11 +1,9 @@
 import express, { type NextFunction, type Request, type Response } from 'express';
 import { z } from 'zod';
-import { listen, type Running } from '../listen.ts';
+import { listen, type Listening, type Running } from '../listen.ts';
 import { latestPrice, referencePrices } from './series.ts';
 
-export interface PricesOptions {
-  /** 0 takes a free port. */
-  port: number;
+export interface PricesOptions extends Listening {
   now?: () => Date;
 }
 
@@ -20,22 +18,23 @@ const moment = (endOfDay: string) =>
 
 const span = z.object({ from: moment('00:00:00').optional(), to: moment('23:59:59.999').optional() });
 
-/** Starts the price service: `/v1/gold?from&to` (a year up to now by default) and `/v1/gold/latest`. */
-export async function startPrices({ port, now = () => new Date() }: PricesOptions): Promise<Running> {
+/** Starts the price service: `/v1/gold?from&to` (the year up to now, or a part of it) and `/v1/gold/latest`. */
+export async function startPrices({ now = () => new Date(), ...where }: PricesOptions): Promise<Running> {
   const app = express().disable('x-powered-by');
   app.get('/v1/gold/latest', (_req, res) => void res.json(latestPrice(now())));
   app.get('/v1/gold', (req, res) => {
     const { from, to } = span.parse(req.query);
-    // Nobody is told a price that has not been set yet.
+    // Nobody is told a price that has not been set yet, nor one older than the series.
     const end = to && to < now() ? to : now();
-    res.json({ unit: 'USD per fine gram', prices: referencePrices(from ?? new Date(end.getTime() - YEAR_MS), end) });
+    const beginning = new Date(now().getTime() - YEAR_MS);
+    res.json({ prices: referencePrices(from && from > beginning ? from : beginning, end) });
   });
   app.use((req, res) => void res.status(404).json({ error: { message: `Nothing at ${req.path}.` } }));
   app.use((error: unknown, _req: Request, res: Response, _next: NextFunction) => {
-    const isBad = error instanceof z.ZodError || error instanceof RangeError;
+    const isBad = error instanceof z.ZodError;
     const message =
       error instanceof z.ZodError ? z.prettifyError(error) : error instanceof Error ? error.message : 'Unknown';
     res.status(isBad ? 400 : 500).json({ error: { message } });
   });
-  return listen(app, port);
+  return listen(app, where);
 }

@@ -1,4 +1,5 @@
 import express, { type Request, type Response, type Router } from 'express';
+import { z } from 'zod';
 import { html } from '../../pages/html.ts';
 import { idOf, newId } from '../ids.ts';
 import { answerAtBank, pay } from '../sessions.ts';
@@ -18,6 +19,7 @@ interface PageParts {
 }
 
 const VISIT_LIFE_S = 3_600;
+const payForm = z.object({ method: z.string() });
 
 /** The pages people see: paying, the bank's question, a seller's set-up, and the overview. */
 export function createHostedPages(parts: PageParts): Router {
@@ -34,15 +36,16 @@ export function createHostedPages(parts: PageParts): Router {
   return pages;
 }
 
-function sendNotFound(res: Response): void {
+function sendNotFound(res: Response): undefined {
   sendProcessorPage(res, { title: 'No such page', status: 404, body: html`<h1>No such page</h1>` });
 }
 
 function openSession({ store }: PageParts, req: Request, res: Response) {
   const session = store.find('checkout.session', String(req.params.id));
-  if (!session) return void sendNotFound(res);
-  if (session.status !== 'open') return void sendClosedPage(res, session);
-  return session;
+  if (!session) return sendNotFound(res);
+  if (session.status === 'open') return session;
+  sendClosedPage(res, session);
+  return undefined;
 }
 
 function showPay(parts: PageParts, req: Request, res: Response): void {
@@ -54,7 +57,7 @@ function takePay(parts: PageParts, req: Request, res: Response): void {
   const session = openSession(parts, req, res);
   if (!session) return;
   const { store, settings } = parts;
-  const method = testMethod(String((req.body as { method?: unknown } | undefined)?.method ?? ''));
+  const method = testMethod(payForm.safeParse(req.body).data?.method ?? '');
   if (!method) return sendPayPage(res, store, { session, problem: 'Choose one of the test cards.' });
   const work = workAs(parts, store.row('checkout.session', session.id)?.owner ?? null);
   const result = store.atomically(() => pay(work, session, method.name));
@@ -67,7 +70,7 @@ function takePay(parts: PageParts, req: Request, res: Response): void {
 
 function askedIntent({ store }: PageParts, req: Request, res: Response) {
   const intent = store.find('payment_intent', String(req.params.id));
-  if (!intent || intent.status !== 'requires_action') return void sendNotFound(res);
+  if (!intent || intent.status !== 'requires_action') return sendNotFound(res);
   const session = store.all('checkout.session').find(({ value }) => value.payment_intent === intent.id)?.value;
   return { intent, session, returnUrl: intent.next_action?.redirect_to_url?.return_url ?? null };
 }

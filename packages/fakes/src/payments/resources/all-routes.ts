@@ -8,6 +8,7 @@ import { moneyReadRoutes } from './money-reads.ts';
 import { paymentIntentRoutes } from './payment-intents.ts';
 import { payoutRoutes } from './payouts.ts';
 import { refundRoutes } from './refunds.ts';
+import { reversalRoutes } from './reversals.ts';
 import { transferRoutes } from './transfers.ts';
 
 /** Every path under `/v1` that the stand-in answers. */
@@ -18,6 +19,7 @@ export const allRoutes: Route[] = [
   ...paymentIntentRoutes,
   ...moneyReadRoutes,
   ...transferRoutes,
+  ...reversalRoutes,
   ...refundRoutes,
   ...payoutRoutes,
   ...disputeRoutes,

@@ -1,8 +1,8 @@
 import type { Stripe } from 'stripe';
 import { refused } from '../errors.ts';
-import { emit } from '../events.ts';
 import { idOf } from '../ids.ts';
-import { assertStatus, attempt, createIntent, declined, saveIntent, succeed } from '../intents.ts';
+import { attempt, declined, succeed } from '../attempts.ts';
+import { assertStatus, cancelIntent, createIntent, saveIntent } from '../intents.ts';
 import { listPage } from '../listing.ts';
 import { mergeMetadata } from '../metadata.ts';
 import { amount, currency, flag, ignored, listOf, metadata, paging, payableAmount, text } from '../parameters.ts';
@@ -141,25 +141,6 @@ const cancel = route(
     return cancelIntent(work, intent, params.cancellation_reason ?? null);
   },
 );
-
-/** Cancels an intent that has taken no money yet. */
-export function cancelIntent(
-  work: Work,
-  intent: Stripe.PaymentIntent,
-  reason: Stripe.PaymentIntent.CancellationReason | null,
-): Stripe.PaymentIntent {
-  const canceled: Stripe.PaymentIntent = {
-    ...intent,
-    amount_capturable: 0,
-    canceled_at: work.nowS,
-    cancellation_reason: reason,
-    next_action: null,
-    status: 'canceled',
-  };
-  work.store.put('payment_intent', canceled);
-  emit(work, 'payment_intent.canceled', canceled);
-  return canceled;
-}
 
 export const paymentIntentRoutes = [
   create,

@@ -10,7 +10,7 @@ import { route } from '../route.ts';
 import { testMethod } from '../test-methods.ts';
 import { mustFind, schedule, type Work } from '../work.ts';
 import { mergeMetadata } from '../metadata.ts';
-import { reverseTransfer } from './transfers.ts';
+import { reverseTransfer } from './reversals.ts';
 import { z } from 'zod';
 
 const createInput = {
