@@ -5,17 +5,19 @@ import { writeSecrets } from './secrets.mjs';
 
 /**
  * Makes sure the processor knows this stack's two webhook endpoints (own account, connected accounts) and returns their
- * signing secrets. A pair registered earlier for the same address is kept, as its secret is told only once.
+ * signing secrets. A pair registered earlier is kept, as its secrets are told only once; it moves with the address.
  */
 export async function ensureWebhooks({ paymentsUrl, secretKey, target, dir }) {
   const file = join(dir, 'webhooks.json');
   const kept = existsSync(file) ? JSON.parse(readFileSync(file, 'utf8')) : [];
   const call = createCall({ paymentsUrl, secretKey });
   const known = await Promise.all(kept.map(({ id }) => call('GET', `/v1/webhook_endpoints/${id}`)));
-  if (kept.length === 2 && known.every((found) => found.status === 200 && found.body.url === target)) {
+  if (kept.length === 2 && known.every(({ status }) => status === 200)) {
+    const moved = known.filter(({ body }) => body.url !== target);
+    // Moved rather than made anew, so that what waits for delivery comes to the new address.
+    for (const { body } of moved) await call('POST', `/v1/webhook_endpoints/${body.id}`, { url: target });
     return kept.map(({ secret }) => secret);
   }
-  for (const { id } of kept) await call('DELETE', `/v1/webhook_endpoints/${id}`);
   const endpoints = [];
   for (const connect of ['false', 'true']) endpoints.push(await register({ call, target, connect }));
   writeSecrets({ file, secrets: endpoints });
