@@ -111,11 +111,12 @@ create table payout_accounts (
 
 create table payouts (
   id text primary key,
-  account_id text not null,
+  account_id text not null references payout_accounts (account_id),
   amount_minor bigint not null,
-  state text not null,
+  state text not null check (state in ('pending', 'in_transit', 'paid', 'failed', 'cancelled')),
   at timestamptz not null
 );
+create index payouts_account_idx on payouts (account_id, at desc);
 
 create table settlements (
   id uuid primary key,
@@ -141,6 +142,7 @@ create table settlements (
 create table transfers (
   id uuid primary key,
   settlement_id uuid not null references settlements,
+  deal_id uuid not null references deals,
   member_id uuid not null references members,
   amount_minor bigint not null check (amount_minor > 0),
   state text not null check (state in ('waiting', 'queued', 'sent', 'failed')),
@@ -150,6 +152,8 @@ create table transfers (
   sent_at timestamptz,
   unique (settlement_id, member_id)
 );
+create index transfers_deal_idx on transfers (deal_id);
+create index transfers_member_idx on transfers (member_id) where state in ('waiting', 'queued');
 
 create table refunds (
   id uuid primary key,
@@ -158,10 +162,13 @@ create table refunds (
   amount_minor bigint not null check (amount_minor > 0),
   why text not null,
   state text not null default 'queued' check (state in ('queued', 'sent', 'failed')),
+  reason text not null default '',
   refund_id text unique,
   key text not null unique,
   sent_at timestamptz
 );
+create index refunds_deal_idx on refunds (deal_id);
+create index refunds_payment_idx on refunds (payment_id);
 
 create table ledger_accounts (
   id bigint generated always as identity primary key,
@@ -248,5 +255,8 @@ grant usage on schema public to lydite_app;
 grant select, insert, update, delete on all tables in schema public to lydite_app;
 grant usage on all sequences in schema public to lydite_app;
 revoke update, delete, truncate on ledger_entries, ledger_transfers, ledger_accounts, audit_log, deal_events, market_clock from lydite_app;
-revoke insert on market_clock from lydite_app;
+revoke insert on market_clock, ledger_accounts, ledger_entries from lydite_app;
+-- An account opens empty, and an entry's running balance is the trigger's to write.
+grant insert (code, currency, normal, min_zero) on ledger_accounts to lydite_app;
+grant insert (transfer_id, account_id, currency, amount) on ledger_entries to lydite_app;
 `;
