@@ -1,6 +1,14 @@
 import cookieParser from 'cookie-parser';
 import express, { type Express } from 'express';
 import { bidRoutes } from './features/bids/bids.routes.ts';
+import { createBidsService } from './features/bids/bids.service.ts';
+import { memberRoutes } from './features/members/members.routes.ts';
+import { createMembersService } from './features/members/members.service.ts';
+import { noticeRoutes } from './features/notices/notices.routes.ts';
+import { createNoticesService } from './features/notices/notices.service.ts';
+import { catalogueRoutes } from './features/catalogue/catalogue.routes.ts';
+import { photoRoutes } from './features/photos/photos.routes.ts';
+import { marketRoutes } from './features/prices/prices.routes.ts';
 import { clientPages } from './platform/client-pages.ts';
 import {
   brake,
@@ -23,7 +31,12 @@ export function bindRoutes(world: World) {
   const { sessions, settings } = world;
   const routes = createRoutes({ sessions, upload: createUpload(), guard: refuseCrossSite(settings.PUBLIC_URL) });
   const { on } = routes;
-  bidRoutes(on, world);
+  memberRoutes(on, createMembersService(world));
+  noticeRoutes(on, createNoticesService(world));
+  bidRoutes(on, createBidsService(world));
+  catalogueRoutes(on, world);
+  marketRoutes(on, world);
+  photoRoutes(on, world);
   return routes;
 }
 

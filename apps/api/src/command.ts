@@ -1,4 +1,5 @@
 import { createOwnerSource } from './data-source.ts';
+import { ensureReferenceData } from './seeds/reference-data.ts';
 
 const usage = 'usage: command migrate | seed | ledger-check | operators-first MAIL MAIL';
 
@@ -7,6 +8,7 @@ async function migrate(): Promise<void> {
   if (!url) throw new Error('Set DATABASE_OWNER_URL: migrations run as the owner of the tables.');
   const owner = await createOwnerSource(url).initialize();
   const done = await owner.runMigrations();
+  await ensureReferenceData(owner);
   await owner.destroy();
   console.log(done.length === 0 ? 'The schema is up to date.' : done.map((one) => `Ran ${one.name}.`).join('\n'));
 }

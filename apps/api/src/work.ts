@@ -1,12 +1,20 @@
 import { setTimeout as sleep } from 'node:timers/promises';
 import { closeLot, lapseUnderOffer, sweepLots } from './features/bids/close-lot.ts';
+import { takePrices } from './features/prices/take-prices.ts';
+import { mailLink } from './features/members/mail-tokens.ts';
+import { mailKnownAddress } from './features/members/register.ts';
+import { mailNotice } from './features/notices/mail-notice.ts';
 import type { JobHandlers } from './platform/jobs.ts';
 import { createOutboxRunner, type OutboxHandler } from './platform/outbox.ts';
 import type { World } from './platform/world.ts';
 
 /** What each kind of outbox item does, except `alarm`, which belongs to the job queue. */
-export function outboxHandlers(_world: World): Record<string, OutboxHandler> {
-  return {};
+export function outboxHandlers(world: World): Record<string, OutboxHandler> {
+  return {
+    'notice.mail': mailNotice(world),
+    'link.mail': mailLink(world),
+    'known-address.mail': mailKnownAddress(world),
+  };
 }
 
 /** What each job does when it rings. */
@@ -19,7 +27,7 @@ export function jobHandlers(world: World): JobHandlers {
     sweep: async () => {
       await sweepLots(world);
     },
-    'prices.take': nothing,
+    'prices.take': () => takePrices(world),
     'payments.poll': nothing,
     'ledger.check': nothing,
   };

@@ -2,6 +2,7 @@ import type { TestProject } from 'vitest/node';
 import { openCluster, startCluster } from '../../../scripts/postgres/cluster.mjs';
 import { databaseUrls, dropDatabase, ensureDatabase } from '../../../scripts/postgres/database.mjs';
 import { createOwnerSource } from '../src/data-source.ts';
+import { ensureReferenceData } from '../src/seeds/reference-data.ts';
 
 export interface TestDatabase {
   adminUrl: string;
@@ -26,6 +27,7 @@ export default async function setup(project: TestProject): Promise<void> {
   const urls = databaseUrls({ cluster, database });
   const owner = await createOwnerSource(urls.DATABASE_OWNER_URL).initialize();
   await owner.runMigrations();
+  await ensureReferenceData(owner);
   await owner.destroy();
   project.provide('database', {
     adminUrl: urls.ADMIN_DATABASE_URL,

@@ -26,6 +26,8 @@ export const errorStatus = {
   'lot.own': 403,
   'lot.closed': 409,
   'lot.price_changed': 409,
+  'catalogue.not_found': 404,
+  'price.unavailable': 503,
   'photo.not_found': 404,
   'photo.unreadable': 422,
   'photo.kind_refused': 422,

@@ -1,5 +1,5 @@
 import { createReadStream } from 'node:fs';
-import { mkdir, rename, rm, stat, writeFile } from 'node:fs/promises';
+import { copyFile, mkdir, rename, rm, stat, writeFile } from 'node:fs/promises';
 import { dirname, join } from 'node:path';
 import type { Readable } from 'node:stream';
 import { randomUUID } from 'node:crypto';
@@ -8,6 +8,8 @@ import { randomUUID } from 'node:crypto';
 export interface FileStore {
   put(key: string, bytes: Buffer): Promise<void>;
   read(key: string): Promise<{ stream: Readable; size: number } | null>;
+  copy(from: string, to: string): Promise<void>;
+  /** Removes a file, or all files under a prefix; what is not there is fine. */
   remove(prefix: string): Promise<void>;
 }
 
@@ -31,6 +33,11 @@ export function createFolderStore(folder: string): FileStore {
       const path = pathOf(key);
       const info = await stat(path).catch(() => null);
       return info && { stream: createReadStream(path), size: info.size };
+    },
+    async copy(from, to) {
+      const path = pathOf(to);
+      await mkdir(dirname(path), { recursive: true });
+      await copyFile(pathOf(from), path);
     },
     async remove(prefix) {
       await rm(pathOf(prefix), { recursive: true, force: true });
