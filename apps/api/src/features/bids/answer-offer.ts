@@ -7,10 +7,16 @@ import { endUnsold } from './close-lot.ts';
 import { lockLot } from './lock-lot.ts';
 import { assertRoom } from './room.ts';
 
+export interface OfferAnswer {
+  lotCode: string;
+  buyerId: string;
+  accept: boolean;
+}
+
 /** The under-bidder takes the lot at the offered price, or refuses it. */
 export const answerOffer = (
   { db }: Pick<World, 'db'>,
-  { lotCode, buyerId, accept }: { lotCode: string; buyerId: string; accept: boolean },
+  { lotCode, buyerId, accept }: OfferAnswer,
 ): Promise<{ dealCode: string | null }> =>
   inTransaction(db, async (tx) => {
     const { lot, now } = await lockLot(tx, { code: lotCode });

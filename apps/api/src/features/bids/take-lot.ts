@@ -9,7 +9,7 @@ import { lockLot } from './lock-lot.ts';
 import { assertTakesBids } from './place-bid.ts';
 import { assertRoom } from './room.ts';
 
-interface TakeOrder {
+export interface TakeOrder {
   lotCode: string;
   buyerId: string;
   /** The price the buyer saw: a lot is never taken at another one. */
