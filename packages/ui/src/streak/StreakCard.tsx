@@ -3,13 +3,13 @@ import { NBSP } from '../text/characters.ts';
 import { formatRange } from '../text/format-mass.ts';
 import { formatSignificant } from '../text/format-number.ts';
 import { streakAxisMaxG } from './streak-axis.ts';
-import type { StreakEstimate, StreakSize } from './streak-types.ts';
+import { outlineOf, type StreakEstimate, type StreakOutline, type StreakSize } from './streak-types.ts';
 import { StreakStone } from './StreakStone.tsx';
 
 interface StreakCardProps {
-  estimate: StreakEstimate | null;
+  estimate: StreakEstimate | StreakOutline | null;
   /** Where the estimate stood before the seller said more, and how to name that: "With photos alone". */
-  before?: { estimate: StreakEstimate; label: string } | null;
+  before?: { estimate: StreakEstimate | StreakOutline; label: string } | null;
   axisMaxG?: number | null;
 }
 
@@ -17,7 +17,8 @@ interface StreakCardProps {
 export function StreakCard({ estimate, before, axisMaxG }: StreakCardProps) {
   const ownMax = estimate ? streakAxisMaxG(estimate) : 0;
   const maxG = axisMaxG ?? Math.max(ownMax, before ? streakAxisMaxG(before.estimate) : 0);
-  const range = (of: StreakEstimate) => formatRange([of.goldG.quantiles.p10, of.goldG.quantiles.p90], 'g', 'words');
+  const range = (of: StreakEstimate | StreakOutline) =>
+    formatRange([outlineOf(of).goldG.p10, outlineOf(of).goldG.p90], 'g', 'words');
   return (
     <div className="streak-card">
       <StreakStone id={useId()} size="card" estimate={estimate} before={before?.estimate} axisMaxG={maxG || null} />
@@ -49,7 +50,7 @@ export function StreakCard({ estimate, before, axisMaxG }: StreakCardProps) {
 }
 
 interface StreakInlineProps {
-  estimate: StreakEstimate | null;
+  estimate: StreakEstimate | StreakOutline | null;
   size?: Extract<StreakSize, 'row' | 'inline' | 'medium'>;
   axisMaxG?: number | null;
   breakEvenG?: number | null;
@@ -61,7 +62,7 @@ interface StreakInlineProps {
 export function StreakInline({ estimate, size = 'inline', ...marks }: StreakInlineProps) {
   const id = useId();
   if (!estimate) return <span className="mute">Not yet estimated</span>;
-  const { p10, p90 } = estimate.goldG.quantiles;
+  const { p10, p90 } = outlineOf(estimate).goldG;
   return (
     <span className="inline-flex flex-wrap items-center gap-2">
       <StreakStone id={id} size={size} estimate={estimate} {...marks} />

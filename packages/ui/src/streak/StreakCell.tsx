@@ -2,13 +2,13 @@ import { useId } from 'react';
 import { formatNumber } from '../text/format-number.ts';
 import { NotchMark } from './NotchMark.tsx';
 import { gradeShare, gradeTicks } from './streak-axis.ts';
-import type { StreakEstimate } from './streak-types.ts';
+import { outlineOf, type StreakEstimate, type StreakOutline } from './streak-types.ts';
 import { StreakStone } from './StreakStone.tsx';
 
 interface StreakCellProps {
   /** Names the lot for assistive technology. */
   subject: string;
-  estimate: StreakEstimate;
+  estimate: StreakEstimate | StreakOutline;
   breakEvenG?: number | null;
   leadBreakEvenG?: number | null;
 }
@@ -16,7 +16,7 @@ interface StreakCellProps {
 /** One lot on the list's common stone: grade on a log axis, so that lots of any mass compare down the column. */
 export function StreakCell({ subject, estimate, breakEvenG, leadBreakEvenG }: StreakCellProps) {
   const grade = (goldG: number) => formatNumber((goldG / estimate.massG) * 1e6, { maximumSignificantDigits: 2 });
-  const { p10, p90 } = estimate.goldG.quantiles;
+  const { p10, p90 } = outlineOf(estimate).goldG;
   const marks = [
     breakEvenG == null ? '' : ` Your bid breaks even at ${grade(breakEvenG)}.`,
     leadBreakEvenG == null ? '' : ` The highest bid of another buyer breaks even at ${grade(leadBreakEvenG)}.`,

@@ -11,6 +11,7 @@ export type {
   StreakBid,
   StreakEstimate,
   StreakInput,
+  StreakOutline,
   StreakSize,
   StreakTheme,
 } from './streak-types.ts';

@@ -1,7 +1,7 @@
 import type { StreakGeometry } from './geometry.ts';
 import type { StreakPalette } from './palette.ts';
 import type { StreakAxis } from './streak-axis.ts';
-import type { AssayMark, StreakEstimate } from './streak-types.ts';
+import type { AssayMark, StreakOutline } from './streak-types.ts';
 import { coordinate as c } from './svg-text.ts';
 
 interface MarkInput {
@@ -38,9 +38,9 @@ export function chevron(breakEvenG: number, { axis, geometry, palette }: MarkInp
 }
 
 /** Dashed brackets where the estimate's p10 and p90 stood before. */
-export function brackets(before: StreakEstimate, { axis, geometry, palette }: MarkInput): string {
+export function brackets(before: StreakOutline, { axis, geometry, palette }: MarkInput): string {
   const top = geometry.smearY - geometry.smearHeight / 2;
-  const { p10, p90 } = before.goldG.quantiles;
+  const { p10, p90 } = before.goldG;
   const d = [p10, p90].map((goldG) => `M${c(axis.x(goldG))} ${c(top)}v${c(geometry.smearHeight)}`).join('');
   return `<path d="${d}" stroke="${palette.stoneInk2}" stroke-width="1.5" stroke-dasharray="2 2.5" fill="none"/>`;
 }

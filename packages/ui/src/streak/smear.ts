@@ -37,13 +37,13 @@ export function seededRandom(seed: number): () => number {
   };
 }
 
-/** Density as it falls on the drawn axis: a log axis squeezes the upper end, so density there counts times the amount. */
+/** Density as it falls on the drawn axis, per gram or per step of a log axis. */
 function profileOf({ distribution, axis, geometry }: SmearInput): Profile {
-  const { fromG, toG, densityAt } = distribution;
+  const { fromG, toG, logDensityAt } = distribution;
   const isLog = geometry.axis === 'log' && fromG > 0;
   const goldAtStep = (i: number) =>
     isLog ? fromG * (toG / fromG) ** (i / POINTS) : fromG + ((toG - fromG) * i) / POINTS;
-  const drawn = (goldG: number) => densityAt(goldG) * (isLog ? goldG : 1);
+  const drawn = (goldG: number) => logDensityAt(goldG) / (isLog ? 1 : goldG || 1);
   const golds = Array.from({ length: POINTS + 1 }, (_, i) => goldAtStep(i));
   const highest = Math.max(...golds.map(drawn)) || 1;
   const relative = (goldG: number) => Math.min(1, drawn(goldG) / highest);

@@ -1,10 +1,12 @@
 import { tickStep, ticks } from 'd3-array';
 import { scaleLinear, scaleLog } from 'd3-scale';
 import type { StreakGeometry } from './geometry.ts';
-import type { MoneyScale, StreakEstimate } from './streak-types.ts';
+import { outlineOf, type MoneyScale, type StreakEstimate, type StreakOutline } from './streak-types.ts';
 
 /** Ends of the list's common axis, grams of gold per tonne. */
 export const GRADE_AXIS: readonly [number, number] = [20, 6000];
+/** Wanted number of ticks on the wide stone. */
+const TICKS = 12;
 const GRADE_TICKS = [50, 100, 200, 500, 1000, 2000];
 
 export interface StreakAxis {
@@ -15,10 +17,14 @@ export interface StreakAxis {
 }
 
 /** End of the gram axis: 1.1 times the 99.5th percentile, carried on to the next tick so that the axis ends on a figure. */
-export function streakAxisMaxG(estimate: StreakEstimate): number {
-  const wanted = estimate.goldG.quantiles.p99_5 * 1.1;
-  const step = tickStep(0, wanted, 12);
-  return Math.ceil(wanted / step - 1e-9) * step;
+export function streakAxisMaxG(estimate: StreakEstimate | StreakOutline): number {
+  const wanted = outlineOf(estimate).goldG.p99_5 * 1.1;
+  // A lot without gold still has a stone to draw it on.
+  if (!(wanted > 0)) return 1;
+  const roundUp = (step: number) => Math.ceil(wanted / step - 1e-9) * step;
+  // Rounding up can push the axis over to the next coarser tick; the second pass then ends on that one.
+  const rounded = roundUp(tickStep(0, wanted, TICKS));
+  return roundUp(tickStep(0, rounded, TICKS));
 }
 
 /** Ticks in grams from 0 to the end of the axis. */

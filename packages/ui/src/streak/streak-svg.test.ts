@@ -113,6 +113,21 @@ describe('the drawing', () => {
     }
   });
 
+  it('bears an estimate without spread and one without gold', () => {
+    for (const goldG of [12.5, 0]) {
+      const quantiles = Object.fromEntries(Object.keys(estimate.goldG.quantiles).map((name) => [name, goldG]));
+      const flat = {
+        massG: 1000,
+        goldG: { quantiles: quantiles as unknown as typeof estimate.goldG.quantiles },
+        beadsG: estimate.beadsG.map(() => goldG),
+        density: { fromG: goldG, toG: goldG, perG: Array.from({ length: 96 }, () => 0) },
+      };
+      for (const size of ['large', 'cell', 'inline'] as const) {
+        expect(streakSvg({ ...base, size, estimate: flat, breakEvenG: 5 })).not.toMatch(/NaN|Infinity/);
+      }
+    }
+  });
+
   it('names colours by variable on screen only', () => {
     expect(streakSvg({ ...base, theme: 'screen' })).toContain('fill="var(--gold)"');
     expect(streakSvg({ ...base, theme: 'print', breakEvenG: 53 })).not.toMatch(/var\(|#EDBB47/);
@@ -181,10 +196,8 @@ describe('golden drawings', () => {
     'inline-row': { size: 'inline' },
     'large-print': { theme: 'print', breakEvenG: 53.06 },
   };
-  for (const [name, change] of Object.entries(states)) {
-    it(name, async () => {
-      const svg = streakSvg({ ...base, id: name, title: name, ...change });
-      await expect(svg.replaceAll('><', '>\n<') + '\n').toMatchFileSnapshot(`golden/${name}.svg`);
-    });
-  }
+  it.each(Object.entries(states))('%s', async (name, change) => {
+    const svg = streakSvg({ ...base, id: name, title: name, ...change });
+    await expect(svg.replaceAll('><', '>\n<') + '\n').toMatchFileSnapshot(`golden/${name}.svg`);
+  });
 });

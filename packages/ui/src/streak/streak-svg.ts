@@ -5,7 +5,7 @@ import { assayTick, beyondMark, brackets, chevron, legend, notch } from './marks
 import { streakPalette, type StreakPalette } from './palette.ts';
 import { smear } from './smear.ts';
 import { gradeAxis, linearAxis, streakAxisMaxG, type StreakAxis } from './streak-axis.ts';
-import type { StreakEstimate, StreakInput } from './streak-types.ts';
+import { outlineOf, type StreakInput, type StreakOutline } from './streak-types.ts';
 import { coordinate as c, escapeSvg } from './svg-text.ts';
 
 /** Faded once a laboratory has spoken: the estimate is then only what was expected. */
@@ -32,9 +32,9 @@ function prepare(input: StreakInput): Drawing {
 }
 
 /** A lot's scratches are its own on every page: the seed comes from the estimate, to the digits all machines agree on. */
-function seedOf({ massG, goldG: { quantiles } }: StreakEstimate): number {
+function seedOf({ massG, goldG }: StreakOutline): number {
   let hash = 2166136261;
-  const text = [massG, quantiles.p10, quantiles.p50].map((value) => value.toPrecision(6)).join(' ');
+  const text = [massG, goldG.p10, goldG.p50].map((value) => value.toPrecision(6)).join(' ');
   for (const character of text) hash = Math.imul(hash ^ (character.codePointAt(0) ?? 0), 16777619);
   return hash;
 }
@@ -60,8 +60,8 @@ function stone(drawing: Drawing): string {
     return height >= 26 ? base + label : base;
   }
   const strength = input.assays?.length ? ASSAYED_STRENGTH : 1;
-  const distribution = distributionOf(input.estimate);
-  const seed = seedOf(input.estimate);
+  const distribution = distributionOf(outlineOf(input.estimate));
+  const seed = seedOf(outlineOf(input.estimate));
   return base + smear({ id: input.id, seed, distribution, axis, geometry, palette, strength });
 }
 
@@ -71,16 +71,15 @@ function marks(drawing: Drawing): string {
   const breakEvenG = input.breakEvenG ?? null;
   const parts: string[] = [];
   const { legend: explained = 'none' } = input;
-  if (estimate && explained !== 'none') parts.push(legend(explained, estimate.beadsG.length, drawing));
-  if (before) parts.push(brackets(before, drawing));
-  if (estimate && geometry.bead > 0) {
-    const shown = estimate.beadsG.filter((goldG) => goldG <= axisMaxG);
+  const beadsG = estimate && 'beadsG' in estimate ? estimate.beadsG : [];
+  if (beadsG.length > 0 && explained !== 'none') parts.push(legend(explained, beadsG.length, drawing));
+  if (before) parts.push(brackets(outlineOf(before), drawing));
+  if (geometry.bead > 0 && beadsG.length > 0) {
+    const shown = beadsG.filter((goldG) => goldG <= axisMaxG);
     parts.push(beads({ beadsG: shown, axis, geometry, palette, breakEvenG, isGhost: assays.length > 0 }));
   }
-  if (estimate && geometry.axis === 'linear') {
-    const beyond = beadsBeyond(estimate.beadsG, axisMaxG);
-    if (beyond > 0) parts.push(beyondMark(beyond, estimate.beadsG.length, drawing));
-  }
+  const beyond = geometry.axis === 'linear' ? beadsBeyond(beadsG, axisMaxG) : 0;
+  if (beyond > 0) parts.push(beyondMark(beyond, beadsG.length, drawing));
   if (breakEvenG !== null) parts.push(notch(breakEvenG, input.closed ?? false, drawing));
   if (input.leadBreakEvenG != null) parts.push(chevron(input.leadBreakEvenG, drawing));
   parts.push(...assays.map((assay) => assayTick(assay, drawing)));

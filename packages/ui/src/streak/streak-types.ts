@@ -3,6 +3,15 @@ import type { Estimate, Quantiles } from '@lydite/valuation';
 /** The part of a stored estimate the streak is drawn from. A whole `Estimate` fits. */
 export type StreakEstimate = Pick<Estimate, 'massG' | 'beadsG' | 'density'> & { goldG: { quantiles: Quantiles } };
 
+/** What a list sends of each estimate: enough for the smear, without beads. */
+export type StreakOutline = Pick<Estimate, 'massG' | 'density'> & { goldG: Quantiles };
+
+/** The outline of either form. */
+export function outlineOf(estimate: StreakEstimate | StreakOutline): StreakOutline {
+  const { massG, goldG, density } = estimate;
+  return { massG, density, goldG: 'quantiles' in goldG ? goldG.quantiles : goldG };
+}
+
 export type StreakSize = 'large' | 'phone' | 'medium' | 'card' | 'row' | 'cell' | 'inline';
 
 /** `screen` names CSS variables, `mail` writes the stone's own colours, `print` is black on white. */
@@ -22,9 +31,9 @@ export interface StreakInput {
   size: StreakSize;
   theme: StreakTheme;
   /** Null draws the bare stone: "Not yet estimated". */
-  estimate: StreakEstimate | null;
+  estimate: StreakEstimate | StreakOutline | null;
   /** The estimate this one replaced: dashed brackets at its p10 and p90. */
-  before?: StreakEstimate | null;
+  before?: StreakEstimate | StreakOutline | null;
   /** Gold in grams at which the own (or the winning) bid breaks even: the notch. */
   breakEvenG?: number | null;
   /** Gold in grams at which another buyer's highest bid breaks even: the open chevron. */
