@@ -14,6 +14,9 @@ interface ScaleProps {
 const FLAG_CLEARANCE = { wide: 120, phone: 76 };
 const NAME_CLEARANCE = { wide: 190, phone: 20 };
 
+/** Room for one amount and the gap after it, px. */
+const MONEY_LABEL_PX = 90;
+
 interface MoneyScaleProps extends ScaleProps {
   money: MoneyScale;
   bid: StreakBid | null;
@@ -27,7 +30,7 @@ export function MoneyAxis({ axisMaxG, width, isWide, money, bid, flag }: MoneySc
   const share = (goldG: number) => goldG / axisMaxG;
   const flagShare = bid ? Math.min(Math.max(share(bid.breakEvenG), 0), 1) : null;
   const clear = FLAG_CLEARANCE[isWide ? 'wide' : 'phone'];
-  const ticks = moneyTicks(axisMaxG, money, isWide ? 14 : 4).filter(({ goldG }) => {
+  const ticks = moneyTicks(axisMaxG, money, isWide ? Math.round(width / MONEY_LABEL_PX) : 4).filter(({ goldG }) => {
     const x = share(goldG) * width;
     const isByFlag = flagShare !== null && Math.abs(x - flagShare * width) < clear;
     return !isByFlag && x > NAME_CLEARANCE[isWide ? 'wide' : 'phone'] && x < width - 24;
