@@ -2,6 +2,7 @@ export * from './types.ts';
 export * from './units/mass.ts';
 export * from './units/length.ts';
 export * from './units/grade.ts';
+export * from './units/plating-standards.ts';
 export * from './quantity/quantity.ts';
 export * from './quantity/quantile.ts';
 export * from './components/plated-gold.ts';

@@ -1,12 +1,12 @@
 import type { Quantity, Warning } from '../types.ts';
 import { quantileOf } from '../quantity/quantile.ts';
 import { roundSignificant } from '../round-significant.ts';
+import { platingStandards } from '../units/plating-standards.ts';
 import { massQuantity, thicknessQuantity } from './evidence.ts';
 import type { LinePlan } from './lot-plan.types.ts';
 import { hasContacts, isSurface } from './plan-gold.ts';
 
-/** The largest minimum in use: MIL-DTL-45204D class 6, 1 500 µin. */
-const thickestStandardUm = 38.1;
+const thickestStandardUm = Math.max(...platingStandards.map(({ minimumUm }) => minimumUm));
 
 type Check = (plan: LinePlan) => { code: string; message: string } | null;
 
