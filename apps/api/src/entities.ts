@@ -19,6 +19,7 @@ export const entities: (new () => object)[] = [
   FrozenEstimate,
   Lot,
   LotLine,
+  Member,
   Payment,
   Refund,
   Transfer,

@@ -64,7 +64,7 @@ const testSettings = (env: Record<string, string>): Settings =>
     PAYMENTS_SECRET_KEY: 'sk_test_of_the_tests',
     PAYMENTS_WEBHOOK_SECRETS: 'whsec_of_the_tests',
     PRICES_URL: 'http://unused.example',
-    LOG_LEVEL: 'silent',
+    LOG_LEVEL: process.env.LOG_LEVEL ?? 'silent',
     LIMITS: 'off',
     ...env,
   });

@@ -1,13 +1,14 @@
 import type { DataSource } from 'typeorm';
 import { AppError } from '../../platform/app-error.ts';
 
-const freeTries = 5;
+/** Failures before the brake: an address may stand for a whole office. */
+const freeTries = { account: 5, address: 20 } as const;
 const longestWaitS = 15 * 60;
 const windowMinutes = 60;
 
-/** Seconds to wait after so many failures within the hour: none for the first five, then 1, 2, 4 … up to 15 minutes. */
-export const waitAfter = (failures: number): number =>
-  failures < freeTries ? 0 : Math.min(longestWaitS, 2 ** (failures - freeTries));
+/** Seconds to wait after so many failures within the hour beyond the free ones: 1, 2, 4 … up to 15 minutes. */
+export const waitAfter = (failures: number, free: number): number =>
+  failures < free ? 0 : Math.min(longestWaitS, 2 ** (failures - free));
 
 /** An IPv4 address, or the /64 an IPv6 address belongs to: one household has many of those. */
 const prefixOf = (ip: string): string =>
@@ -25,12 +26,12 @@ const keysOf = ({ email, ip }: Attempt): string[] => [`account:${email.toLowerCa
  * @throws AppError request.too_many with the seconds to wait
  */
 export async function assertMayTry(db: DataSource, attempt: Attempt): Promise<void> {
-  const rows: { n: number; since: number }[] = await db.query(
-    `select count(*)::int as n, extract(epoch from market_now() - max(at))::float8 as since from sign_in_failures
+  const rows: { kind: 'account' | 'address'; n: number; since: number }[] = await db.query(
+    `select split_part(key, ':', 1) as kind, count(*)::int as n, extract(epoch from market_now() - max(at))::float8 as since from sign_in_failures
       where key = any($1) and at > market_now() - make_interval(mins => $2) group by key`,
     [keysOf(attempt), windowMinutes],
   );
-  const wait = Math.max(0, ...rows.map(({ n, since }) => waitAfter(n) - since));
+  const wait = Math.max(0, ...rows.map(({ kind, n, since }) => waitAfter(n, freeTries[kind]) - since));
   if (wait > 0)
     throw new AppError(
       'request.too_many',
