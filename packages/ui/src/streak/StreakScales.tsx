@@ -33,7 +33,7 @@ export function MoneyAxis({ axisMaxG, width, isWide, money, bid, flag }: MoneySc
   const ticks = moneyTicks(axisMaxG, money, isWide ? Math.round(width / MONEY_LABEL_PX) : 4).filter(({ goldG }) => {
     const x = share(goldG) * width;
     const isByFlag = flagShare !== null && Math.abs(x - flagShare * width) < clear;
-    return !isByFlag && x > NAME_CLEARANCE[isWide ? 'wide' : 'phone'] && x < width - 24;
+    return !isByFlag && x > NAME_CLEARANCE[isWide ? 'wide' : 'phone'] && x < width - 30;
   });
   const hidesName = flagShare !== null && flagShare * width < NAME_CLEARANCE.wide + 70;
   const name = currencyNames[money.currency] ?? money.currency;
