@@ -27,8 +27,8 @@ const gradients = [
   gradient('ceramic-pale', ['#d6d1c5', '#bcb6a7', '#9c9583']),
   gradient('resin-brown', ['#8b774e', '#6d5b3a', '#54452b']),
   gradient('resin-green', ['#54786a', '#3d5c50', '#2d463e']),
-  gradient('steel', ['#d9dddd', '#aab0b1', '#bcc1c2', '#828889']),
-  gradient('steel-bright', ['#f0f2f2', '#c3c8c9', '#e0e3e3', '#9da3a5']),
+  gradient('steel', ['#c3c8c8', '#979d9f', '#adb2b3', '#757b7d']),
+  gradient('steel-bright', ['#dfe2e2', '#adb3b4', '#cbcfd0', '#8d9395']),
   gradient('nickel', ['#7e8384', '#e3e6e6', '#b2b7b8', '#6e7374'], down),
   gradient('tin', ['#8d9091', '#d7dadb', '#9a9d9e'], across),
   gradient('brass', ['#8a6a2c', '#e2c47a', '#b58f45', '#74561f'], down),
@@ -39,7 +39,7 @@ const gradients = [
   gradient('paper', ['#fbfaf5', '#f1efe7', '#e6e3d8']),
   gradient('display', ['#b7c4a6', '#a3b193'], down),
   gradient('platform', ['#e4e6e6', '#b9bdbe', '#9da2a3'], down),
-  gradient('weave', ['#d5cdb6', '#e4dec9', '#c3b99c'], across),
+  gradient('weave', ['#cdc4aa', '#dcd5bd', '#b3a98a'], across),
 ];
 
 const surface = (id, frequency, octaves, seed, depth) =>
@@ -47,5 +47,5 @@ const surface = (id, frequency, octaves, seed, depth) =>
 
 /** Every gradient and filter the drawings refer to by name. */
 export const materials = svg`<defs>${gradients}
-${surface('brushed', '.006 .4', 3, 9, 0.5)}${surface('mottled', '.02', 5, 4, 1)}${surface('wood', '.004 .09', 5, 12, 1.6)}${surface('fibrous', '.03 .5', 3, 5, 0.6)}${surface('speckled', '.6', 2, 8, 0.9)}
-<filter id="blur-soft"><feGaussianBlur stdDeviation="12"/></filter><filter id="blur-wide" x="-50%" y="-50%" width="200%" height="200%"><feGaussianBlur stdDeviation="40"/></filter></defs>`;
+${surface('brushed', '.006 .4', 3, 9, 0.5)}${surface('mottled', '.045', 6, 4, 0.9)}${surface('wood', '.004 .09', 5, 12, 1.6)}${surface('fibrous', '.03 .5', 3, 5, 0.6)}${surface('speckled', '.6', 2, 8, 0.9)}
+<filter id="blur-soft" x="-30%" y="-30%" width="160%" height="160%"><feGaussianBlur stdDeviation="12"/></filter><filter id="blur-wide" x="-50%" y="-50%" width="200%" height="200%"><feGaussianBlur stdDeviation="40"/></filter></defs>`;

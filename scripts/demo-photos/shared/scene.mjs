@@ -36,30 +36,18 @@ export function lay(part, { x, y, turn = 0, lean = 1, shade = 0, lift = 'mid', s
   return svg`<g>${shadow(part.outline, lifts[lift], pose)}${side}<g ${pose(0)}><path d="${part.outline}" fill="${part.edge ?? '#20261f'}"/>${part.face}${light}</g></g>`;
 }
 
-const lifts = {
-  none: [],
-  low: [
-    [2, 4, 0.3],
-    [4, 9, 0.16],
-  ],
-  mid: [
-    [3, 4, 0.3],
-    [5, 10, 0.16],
-    [9, 18, 0.1],
-    [12, 28, 0.07],
-  ],
-  high: [
-    [4, 5, 0.28],
-    [8, 14, 0.15],
-    [13, 26, 0.1],
-    [18, 40, 0.07],
-    [23, 56, 0.05],
-  ],
-};
+/** Rings of shadow: how far each falls, how wide it spreads, how dark it is. */
+const rings = (count, reach) =>
+  Array.from({ length: count }, (_, index) => {
+    const share = (index + 1) / count;
+    return [2 + reach * 0.42 * share, 3 + reach * share, 0.62 / (count + index * 1.5)];
+  });
+
+const lifts = { none: [], low: rings(3, 11), mid: rings(7, 30), high: rings(10, 60) };
 
 /** Widening outlines instead of a blur filter, which would take minutes for a heap. */
-const shadow = (outline, rings, pose) =>
-  rings.map(
+const shadow = (outline, lift, pose) =>
+  lift.map(
     ([drop, soft, opacity]) =>
       svg`<g transform="translate(${drop * 0.5} 0)"><path d="${outline}" fill="#05080a" stroke="#05080a" stroke-width="${soft}" stroke-linejoin="round" opacity="${opacity}" ${pose(drop)}/></g>`,
   );
