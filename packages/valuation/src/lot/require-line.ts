@@ -1,5 +1,5 @@
 import { requireBetween, requirePositive } from '../argument.ts';
-import type { LineInput } from '../types.ts';
+import type { LineInput, PlatingEvidence } from '../types.ts';
 
 /**
  * Refuses figures that no material could have; unlikely ones pass and become warnings.
@@ -25,11 +25,11 @@ export function requireLine(line: LineInput, index: number): void {
     requireBetween(at('assay.gradeGPerT'), line.assay.gradeGPerT, 0, 1e6);
     requireBetween(at('assay.relativeSd'), line.assay.relativeSd, 0, 1);
   }
-  requirePlating(line.plating, at);
+  if (line.plating) requirePlating(line.plating, at);
 }
 
-function requirePlating(plating: LineInput['plating'], at: (field: string) => string): void {
-  switch (plating?.kind) {
+function requirePlating(plating: PlatingEvidence, at: (field: string) => string): void {
+  switch (plating.kind) {
     case 'standard':
       return requireBetween(at('plating.minimumUm'), plating.minimumUm, 0);
     case 'range':

@@ -44,7 +44,7 @@ export const edgeClasses: MaterialClass[] = [
         id: 'plating',
         name: 'gold contacts',
         parameters: {
-          areaCm2PerPiece: ln(4.8, 1.15, 'modelled: 168 to 288 contacts along 133.35 mm, both sides (from memory)'),
+          areaCm2PerPiece: ln(4.8, 1.15, 'modelled: 168 to 288 contacts along 133.35 mm, both sides (not verified)'),
           thicknessUm: ln(
             0.45,
             2.2,
@@ -84,7 +84,7 @@ export const edgeClasses: MaterialClass[] = [
           thicknessUm: ln(
             0.5,
             1.9,
-            'IPC-6012 class 1 and 2: 0.8 µm (from memory); common practice, no source: 50–60 µin when older',
+            'IPC-6012 class 1 and 2: 0.8 µm (not verified); common practice, no source: 50–60 µin when older',
           ),
           ...hardDeposit,
         },
