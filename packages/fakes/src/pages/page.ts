@@ -29,6 +29,7 @@ button,.button{display:inline-flex;align-items:center;min-height:44px;padding:8p
 button.second,.button.second{background:none;color:var(--act)}
 button.small{min-height:44px;padding:4px 12px;font-size:.875rem;font-weight:500;background:none;color:var(--act)}
 form.inline{display:inline-block;margin-right:8px}
+summary{min-height:44px;padding:10px 0;border-top:1px solid var(--line);cursor:pointer}
 .row{display:flex;flex-wrap:wrap;gap:12px;align-items:center}
 .alert{border-left:4px solid var(--bad);background:var(--bad-wash);color:var(--ink);padding:12px 16px;margin:0 0 20px}
 :focus-visible{outline:3px solid var(--act);outline-offset:2px}
@@ -39,7 +40,7 @@ th,td{text-align:left;padding:8px 12px;border-top:1px solid var(--line);vertical
 thead th{border-top:0;font-weight:600}
 td.num,th.num{text-align:right;font-variant-numeric:tabular-nums;white-space:nowrap}
 td code{overflow-wrap:anywhere;font-size:.8125rem}
-iframe{width:100%;height:60vh;border:1px solid var(--line);background:#fff}
+iframe{width:100%;height:20rem;border:1px solid var(--line);background:#fff}
 pre{white-space:pre-wrap;overflow-wrap:anywhere;background:var(--sheet);border:1px solid var(--line);padding:16px;margin:0 0 16px;font-size:.9375rem}
 dl{display:grid;grid-template-columns:max-content 1fr;gap:4px 16px;margin:0 0 16px}
 dt{color:var(--ink-2)}
@@ -72,6 +73,7 @@ export function sendPage(
     "default-src 'none'",
     `style-src 'sha256-${styleHash}'`,
     `form-action ${["'self'", ...new Set(origins)].join(' ')}`,
+    'img-src data:',
     "frame-src 'self'",
     "base-uri 'none'",
     "frame-ancestors 'none'",

@@ -15,6 +15,8 @@ export interface TestMethod {
   /** The number a person types on the hosted page. */
   number: string;
   label: string;
+  /** Offered on the hosted page only under “Rarer cases”. */
+  isRare?: boolean;
   outcome: Outcome;
 }
 
@@ -33,8 +35,7 @@ const card = (name: string, last: string, label: string, outcome: Outcome): Test
 
 const generic = 'Your card was declined.';
 
-/** The documented test methods; the first six and the debit are offered on the hosted page. */
-export const testMethods: TestMethod[] = [
+const usualMethods: TestMethod[] = [
   { ...card('visa', '', 'Payment succeeds', { kind: 'succeeds' }), number: '4242 4242 4242 4242' },
   card('chargeDeclined', '0002', 'Card declined', declined('card_declined', generic, 'generic_decline')),
   card(
@@ -52,6 +53,9 @@ export const testMethods: TestMethod[] = [
     label: 'Bank debit (US): stays in processing until settled',
     outcome: { kind: 'debits' },
   },
+];
+
+const rareMethods: TestMethod[] = [
   card('chargeDeclinedExpiredCard', '0069', 'Expired card', declined('expired_card', 'Your card has expired.')),
   card(
     'chargeDeclinedIncorrectCvc',
@@ -71,6 +75,9 @@ export const testMethods: TestMethod[] = [
   card('refundFail', '5126', 'Succeeds, a refund fails later', { kind: 'succeeds', refunds: 'fail' }),
   card('pendingRefund', '7726', 'Succeeds, a refund waits first', { kind: 'succeeds', refunds: 'wait' }),
 ];
+
+/** The documented test methods, in the order the hosted page shows them. */
+export const testMethods = [...usualMethods, ...rareMethods.map((method) => ({ ...method, isRare: true }))];
 
 /** Finds a test method by `pm_card_…`, `pm_card_visa_…`, `tok_…` or its number; undefined when there is none. */
 export function testMethod(reference: string): TestMethod | undefined {

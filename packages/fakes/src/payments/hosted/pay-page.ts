@@ -22,6 +22,7 @@ export function sendPayPage(
   const items = store.row('checkout.session', session.id)?.hidden.lineItems ?? [];
   const sum = moneyText(session.amount_total ?? 0, session.currency ?? 'usd');
   const offered = testMethods.filter((method) => session.payment_method_types.includes(typeOf(method)));
+  const [usual, rare] = [offered.filter(({ isRare }) => !isRare), offered.filter(({ isRare }) => isRare)];
   const body = html` <h1>Pay ${sum}</h1>
     ${problem && html`<div class="alert" role="alert"><strong>Not paid.</strong> ${problem} You can try another way.</div>`}
     ${items.map((item) => html`<p>${item.description}: ${moneyText(item.amount_total, item.currency)}</p>`)}
@@ -29,7 +30,11 @@ export function sendPayPage(
     <form method="post">
       <fieldset>
         <legend>Test card or bank account</legend>
-        ${offered.map((method, index) => choice(method, index === 0))}
+        ${usual.map((method, index) => choice(method, { isFirst: index === 0 }))}
+        <details>
+          <summary>Rarer cases</summary>
+          ${rare.map((method) => choice(method, { isFirst: false }))}
+        </details>
       </fieldset>
       <div class="row">
         <button>Pay ${sum}</button>
@@ -39,7 +44,7 @@ export function sendPayPage(
   sendProcessorPage(res, { title: `Pay ${sum}`, body, leadsTo: [session.success_url, session.cancel_url] });
 }
 
-function choice(method: TestMethod, isFirst: boolean) {
+function choice(method: TestMethod, { isFirst }: { isFirst: boolean }) {
   return html`<label class="pick"
     ><input type="radio" name="method" value="${method.name}" required ${isFirst && html`checked`} /><span
       >${method.label}<code>${method.number}</code></span
