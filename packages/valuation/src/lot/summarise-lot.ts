@@ -1,8 +1,9 @@
+import { quantileOf } from '../quantity/quantile.ts';
 import type { Estimate, LineEstimate, Quantiles } from '../types.ts';
 import { ascending } from './ascending.ts';
 import { densityOf } from './density.ts';
 import { driversOf } from './drivers.ts';
-import type { LinePlan } from './lot-plan.types.ts';
+import type { LinePlan, Term } from './lot-plan.types.ts';
 import { meanAndVariance, quantilesOf, sortedQuantile, spreadOf } from './quantiles.ts';
 import type { LotDraws } from './simulate-lot.ts';
 
@@ -36,12 +37,12 @@ export function summariseLot(draws: LotDraws): Estimate {
 function summariseLines({ plan, lines, goldG }: LotDraws): LineEstimate[] {
   const total = meanAndVariance(goldG);
   return lines.map((line, index) => {
-    const { input, materialClass, gold } = plan.lines[index] as LinePlan;
+    const { input, materialClass, gold, mass } = plan.lines[index] as LinePlan;
     const spread = spreadOf(ascending(line.goldG));
     return {
       id: input.id,
       classCode: materialClass.code,
-      massG: sortedQuantile(ascending(line.massG), 0.5),
+      massG: medianOf(mass, line.massG),
       pieces: input.pieces,
       goldG: spread,
       gradeGPerT: gradesOf(line.goldG, line.massG),
@@ -52,6 +53,14 @@ function summariseLines({ plan, lines, goldG }: LotDraws): LineEstimate[] {
       })),
     };
   });
+}
+
+/** Middle of a mass; known without draws, and so to the last digit as it was given, unless it is a product of several figures. */
+function medianOf(mass: Term | null, drawnG: Float64Array): number {
+  if (!mass) return 0;
+  const [only, ...others] = mass.factors;
+  if (others.length > 0) return sortedQuantile(ascending(drawnG), 0.5);
+  return only ? mass.constant * quantileOf(only.quantity, 0.5) ** only.power : mass.constant;
 }
 
 /** Quantiles of gold over mass, draw by draw, in g/t; 0 where there is no mass. */
