@@ -7,8 +7,15 @@ import { createMembersService } from './features/members/members.service.ts';
 import { noticeRoutes } from './features/notices/notices.routes.ts';
 import { createNoticesService } from './features/notices/notices.service.ts';
 import { catalogueRoutes } from './features/catalogue/catalogue.routes.ts';
+import { dealRoutes } from './features/deals/deals.routes.ts';
+import { createDealsService } from './features/deals/deals.service.ts';
+import { deliveryRoutes } from './features/deliveries/deliveries.routes.ts';
+import { createDeliveriesService } from './features/deliveries/deliveries.service.ts';
+import { lotRoutes } from './features/lots/lots.routes.ts';
 import { photoRoutes } from './features/photos/photos.routes.ts';
 import { marketRoutes } from './features/prices/prices.routes.ts';
+import { settlementRoutes } from './features/settlements/settlements.routes.ts';
+import { createSettlementsService } from './features/settlements/settlements.service.ts';
 import { clientPages } from './platform/client-pages.ts';
 import {
   brake,
@@ -35,8 +42,12 @@ export function bindRoutes(world: World) {
   noticeRoutes(on, createNoticesService(world));
   bidRoutes(on, createBidsService(world));
   catalogueRoutes(on, world);
+  lotRoutes(on, world);
   marketRoutes(on, world);
   photoRoutes(on, world);
+  dealRoutes(on, createDealsService(world));
+  deliveryRoutes(on, createDeliveriesService(world));
+  settlementRoutes(on, createSettlementsService(world));
   return routes;
 }
 

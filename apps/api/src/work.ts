@@ -4,6 +4,7 @@ import { takePrices } from './features/prices/take-prices.ts';
 import { mailLink } from './features/members/mail-tokens.ts';
 import { mailKnownAddress } from './features/members/register.ts';
 import { mailNotice } from './features/notices/mail-notice.ts';
+import { runDeadline, sweepDeadlines } from './features/deals/deadlines.service.ts';
 import type { JobHandlers } from './platform/jobs.ts';
 import { createOutboxRunner, type OutboxHandler } from './platform/outbox.ts';
 import type { World } from './platform/world.ts';
@@ -23,9 +24,10 @@ export function jobHandlers(world: World): JobHandlers {
   return {
     'lot.close': (lotId) => closeLot(world, lotId),
     'under-offer.lapse': (offerId) => lapseUnderOffer(world, offerId),
-    'deal.deadline': nothing,
+    'deal.deadline': (dealId) => runDeadline(world, dealId),
     sweep: async () => {
       await sweepLots(world);
+      await sweepDeadlines(world);
     },
     'prices.take': () => takePrices(world),
     'payments.poll': nothing,

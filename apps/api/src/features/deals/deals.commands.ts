@@ -5,7 +5,7 @@ import { marketTerms } from '../../platform/market-terms.ts';
 import { createWords } from '../../platform/words.ts';
 import { lotHeadline } from '../lots/lots.reads.ts';
 import { notify } from '../notices/notices.commands.ts';
-import { refundHold } from '../settlements/settlements.commands.ts';
+import { returnHold } from '../payments/payments.commands.ts';
 import { holdOf } from '../settlements/settlements.reads.ts';
 import { addEvent, dueAfter, lockDeal, moveDeal, setAlarms, type LockedDeal } from './deal-steps.commands.ts';
 import { Deal } from './deal.entity.ts';
@@ -92,7 +92,7 @@ async function tellAwarded(tx: EntityManager, deal: LockedDeal): Promise<void> {
 }
 
 /**
- * The payment of a deal succeeded and is posted to `hold.deal:<id>`: the deal is held. On a deal that has ended meanwhile
+ * The payment of a deal succeeded and is posted to the deal's hold account: the deal is held. On a deal that has ended meanwhile
  * all of it goes back at once. The same payment told twice changes nothing.
  */
 export async function recordHold(
@@ -103,7 +103,7 @@ export async function recordHold(
   if (deal.paidAt) return 'known';
   if (deal.state === 'cancelled') {
     await tx.update(Deal, { id: dealId }, { paidAt: now, updatedAt: now });
-    await refundHold(tx, deal, { why: 'paid after the deal had ended', now });
+    await returnHold(tx, deal, 'paid after the deal had ended');
     await addEvent(tx, { dealId, at: now, actor: 'market', actorId: null, kind: 'paid_too_late', detail: {} });
     return 'refunded';
   }

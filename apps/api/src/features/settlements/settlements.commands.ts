@@ -4,6 +4,7 @@ import { marketTerms } from '../../platform/market-terms.ts';
 import { createWords } from '../../platform/words.ts';
 import { dueAfter, moveDeal, type LockedDeal } from '../deals/deal-steps.commands.ts';
 import { postTransfer } from '../ledger/ledger.commands.ts';
+import { accountCode } from '../ledger/ledger.reads.ts';
 import { notify } from '../notices/notices.commands.ts';
 import { orderRefund, orderTransfer } from '../payments/payments.commands.ts';
 import { settleOutright } from './settle-outright.rules.ts';
@@ -63,21 +64,20 @@ export async function settleDeal(tx: EntityManager, deal: LockedDeal, order: Set
 async function payOut(tx: EntityManager, deal: LockedDeal, settlement: Settlement): Promise<void> {
   const { id, paidInMinor, sellerGetsMinor, refundMinor, at } = settlement;
   const entries = [
-    { account: `hold.deal:${deal.id}`, amountMinor: paidInMinor },
-    { account: `payable.seller:${deal.sellerId}`, amountMinor: -sellerGetsMinor },
-    { account: 'income.fee', amountMinor: -(settlement.buyerFeeMinor + settlement.sellerFeeMinor) },
-    { account: 'liability.tax', amountMinor: -(settlement.buyerTaxMinor + settlement.sellerTaxMinor) },
-    { account: `clearing.refund:${deal.id}`, amountMinor: -refundMinor },
-  ].filter(({ amountMinor }) => amountMinor !== 0);
+    { account: accountCode.hold(deal.code), amountMinor: paidInMinor },
+    { account: accountCode.payable(deal.sellerId), amountMinor: -sellerGetsMinor },
+    { account: accountCode.fees, amountMinor: -(settlement.buyerFeeMinor + settlement.sellerFeeMinor) },
+    { account: accountCode.tax, amountMinor: -(settlement.buyerTaxMinor + settlement.sellerTaxMinor) },
+    { account: accountCode.refund(deal.code), amountMinor: -refundMinor },
+  ];
   await postTransfer(tx, { kind: 'settlement', dealId: deal.id, key: `settlement:${deal.id}`, eventAt: at, entries });
-  if (sellerGetsMinor > 0)
-    await orderTransfer(tx, {
-      settlementId: id,
-      memberId: deal.sellerId,
-      dealId: deal.id,
-      amountMinor: sellerGetsMinor,
-    });
-  if (refundMinor > 0) await orderRefund(tx, { dealId: deal.id, amountMinor: refundMinor, why: 'settlement' });
+  await orderTransfer(tx, {
+    settlementId: id,
+    memberId: deal.sellerId,
+    dealId: deal.id,
+    amountMinor: sellerGetsMinor,
+  });
+  await orderRefund(tx, { dealId: deal.id, amountMinor: refundMinor, why: 'settlement' });
 }
 
 async function tellSettled(tx: EntityManager, deal: LockedDeal, settlement: Settlement): Promise<void> {
@@ -100,23 +100,4 @@ async function tellSettled(tx: EntityManager, deal: LockedDeal, settlement: Sett
         ? `The hold is released; ${money(refundMinor)} comes back to you. The statement shows every step.`
         : 'The hold is released to the seller. The statement shows every step.',
   });
-}
-
-/** Gives the whole hold of an ended deal back to the buyer: no fees, no tax. */
-export async function refundHold(
-  tx: EntityManager,
-  deal: LockedDeal,
-  { why, now }: { why: string; now: Date },
-): Promise<void> {
-  await postTransfer(tx, {
-    kind: 'refund_due',
-    dealId: deal.id,
-    key: `refund-due:${deal.id}`,
-    eventAt: now,
-    entries: [
-      { account: `hold.deal:${deal.id}`, amountMinor: deal.holdMinor },
-      { account: `clearing.refund:${deal.id}`, amountMinor: -deal.holdMinor },
-    ],
-  });
-  await orderRefund(tx, { dealId: deal.id, amountMinor: deal.holdMinor, why });
 }

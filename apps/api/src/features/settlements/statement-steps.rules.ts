@@ -56,7 +56,7 @@ export function statementSteps({ deal, figures, reason, words }: StatementInput)
     ],
     buyerSteps: [
       row('Paid into hold', 'By the buyer, after the award', deal.paidInMinor),
-      row('Value', 'As above, to the seller and the market', -valueMinor),
+      row('Value', 'Of the lot, to the seller', -valueMinor),
       ...freight.map((one) => ({ ...one, amountMinor: -one.amountMinor })),
       row('Buyer’s fee', fee(deal.buyerFeeBp, buyerFeeMinor), -buyerFeeMinor),
       ...(deal.buyerTaxBp > 0 ? [row('Tax on the fee', tax(deal.buyerTaxBp, buyerFeeMinor), -buyerTaxMinor)] : []),
