@@ -1,3 +1,4 @@
+import { join } from 'node:path';
 import cookieParser from 'cookie-parser';
 import express, { type Express } from 'express';
 import { bidRoutes } from './features/bids/bids.routes.ts';
@@ -36,7 +37,11 @@ import type { World } from './platform/world.ts';
 /** The only file that knows all features: builds their services, binds their routes, mounts the error handler. */
 export function bindRoutes(world: World) {
   const { sessions, settings } = world;
-  const routes = createRoutes({ sessions, upload: createUpload(), guard: refuseCrossSite(settings.PUBLIC_URL) });
+  const routes = createRoutes({
+    sessions,
+    upload: createUpload(join(settings.FILES_DIR, 'quarantine')),
+    guard: refuseCrossSite(settings.PUBLIC_URL),
+  });
   const { on } = routes;
   memberRoutes(on, createMembersService(world));
   noticeRoutes(on, createNoticesService(world));

@@ -1,7 +1,5 @@
 import { mkdirSync } from 'node:fs';
 import { rm } from 'node:fs/promises';
-import { tmpdir } from 'node:os';
-import { join } from 'node:path';
 import type { RequestHandler } from 'express';
 import multer from 'multer';
 
@@ -12,7 +10,7 @@ export const uploadLimits = { fileBytes: 25 * 1024 * 1024, files: 1, fields: 4, 
  * Takes one file named `photo` to a quarantine folder under a random name; nothing of the sender's name reaches the disk.
  * The file is removed when the answer is sent or the caller gone, whatever came of it.
  */
-export function createUpload(folder = join(tmpdir(), 'lydite-quarantine')): RequestHandler {
+export function createUpload(folder: string): RequestHandler {
   mkdirSync(folder, { recursive: true });
   const receive = multer({
     dest: folder,

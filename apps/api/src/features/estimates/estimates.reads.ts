@@ -2,6 +2,8 @@ import type { Estimate, LotInput } from '@lydite/valuation';
 import type { EntityManager } from 'typeorm';
 import { FrozenEstimate } from './estimate.entity.ts';
 
+export { toOutline, type OutlineParts } from './estimates.rules.ts';
+
 export interface StoredEstimate {
   input: LotInput;
   result: Estimate;
