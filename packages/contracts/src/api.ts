@@ -1,7 +1,7 @@
 import { bidEndpoints } from './bids.ts';
-import { dealEndpoints } from './deals.ts';
+import { dealEndpoints } from './deal-endpoints.ts';
 import { deskEndpoints } from './desk.ts';
-import { lotEndpoints } from './lots.ts';
+import { lotEndpoints } from './lot-endpoints.ts';
 import { marketEndpoints } from './market.ts';
 import { memberEndpoints } from './members.ts';
 

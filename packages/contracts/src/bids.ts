@@ -1,7 +1,8 @@
 import { z } from 'zod';
 import { amountMinor, isoTime, lotCode, positiveMinor } from './common.ts';
 import { endpoints } from './endpoint.ts';
-import { lotState, ownStanding } from './lots.ts';
+import { lotState } from './lot-draft.ts';
+import { ownStanding } from './lots.ts';
 
 /** `attempt` is chosen once per press of the button: sending it twice places one bid and gives the same answer. */
 export const placeBidRequest = z.strictObject({ ceilingMinor: positiveMinor, attempt: z.uuid() });
