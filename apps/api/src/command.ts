@@ -1,3 +1,4 @@
+import { ledgerCheck } from './commands/ledger-check.ts';
 import { createOwnerSource } from './data-source.ts';
 import { ensureReferenceData } from './seeds/reference-data.ts';
 
@@ -13,7 +14,7 @@ async function migrate(): Promise<void> {
   console.log(done.length === 0 ? 'The schema is up to date.' : done.map((one) => `Ran ${one.name}.`).join('\n'));
 }
 
-const commands: Record<string, (args: string[]) => Promise<void>> = { migrate };
+const commands: Record<string, (args: string[]) => Promise<void>> = { migrate, 'ledger-check': ledgerCheck };
 
 const [name = '', ...args] = process.argv.slice(2);
 const command = commands[name];

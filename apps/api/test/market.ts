@@ -16,7 +16,7 @@ import { clientHeader } from '../src/platform/guards.ts';
 import { cookieNames, createSessions } from '../src/platform/session.ts';
 import type { World } from '../src/platform/world.ts';
 import { readSettings, type Settings } from '../src/settings.ts';
-import { createRunner } from '../src/work.ts';
+import { createInbox, createRunner } from '../src/work.ts';
 import { copyDatabase } from './database.ts';
 
 export interface Options {
@@ -101,6 +101,11 @@ export async function openMarket({ payments = () => noPayments, env = {} }: Opti
   });
   const origin = `http://127.0.0.1:${(server.address() as AddressInfo).port}`;
   const runner = createRunner(world);
+  const inbox = createInbox(world);
+  const work = async (): Promise<number> => {
+    const count = (await inbox.runAll()) + (await runner.runAll());
+    return count === 0 ? 0 : count + (await work());
+  };
 
   return {
     world,
@@ -121,8 +126,8 @@ export async function openMarket({ payments = () => noPayments, env = {} }: Opti
       caller.cookies.set(cookieNames.access, tokens.access).set(cookieNames.refresh, tokens.refresh);
       return caller;
     },
-    /** Carries out every due outside effect. */
-    work: () => runner.runAll(),
+    /** Carries out every due outside effect and every effect of events received, until none is left; their number. */
+    work,
     /** Moves the market's clock ahead, e.g. by `3 days`. */
     advance: (interval: string) => owner.query('update market_clock set shift = shift + $1::interval', [interval]),
     async close() {

@@ -1,4 +1,5 @@
 import type { EntityManager } from 'typeorm';
+import { moveWeighInTimes } from '../deliveries/deliveries.commands.ts';
 import { addEvent, lockDeal, setAlarms } from './deal-steps.commands.ts';
 import { Deal } from './deal.entity.ts';
 
@@ -14,7 +15,9 @@ export async function freezeDeal(tx: EntityManager, { dealId }: { dealId: string
 export async function releaseDeal(tx: EntityManager, { dealId }: { dealId: string }): Promise<void> {
   const { deal, now } = await lockDeal(tx, { id: dealId });
   if (!deal.frozenAt) return;
-  const dueAt = deal.dueAt && new Date(deal.dueAt.getTime() + now.getTime() - deal.frozenAt.getTime());
+  const stoodStillMs = now.getTime() - deal.frozenAt.getTime();
+  const dueAt = deal.dueAt && new Date(deal.dueAt.getTime() + stoodStillMs);
+  await moveWeighInTimes(tx, dealId, stoodStillMs);
   await tx.update(Deal, { id: dealId }, { frozenAt: null, dueAt, updatedAt: now });
   await addEvent(tx, { dealId, at: now, actor: 'market', actorId: null, kind: 'release', detail: {} });
   if (deal.dueKind && dueAt)

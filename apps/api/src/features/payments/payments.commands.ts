@@ -43,6 +43,12 @@ export async function releaseWaitingTransfers(tx: EntityManager, memberId: strin
   for (const { id } of rows) await queueTransfer(tx, id);
 }
 
+/** The same for the transfers of one deal that is no longer frozen. */
+export async function releaseDealTransfers(tx: EntityManager, dealId: string): Promise<void> {
+  const waiting = await tx.findBy(Transfer, { dealId, state: 'waiting' });
+  for (const { memberId } of waiting) await releaseWaitingTransfers(tx, memberId);
+}
+
 /** A transfer may be queued again after it waited, so each time is an item of its own; the row's key makes the call happen once. */
 const queueTransfer = (tx: EntityManager, transferId: string): Promise<void> =>
   addToOutbox(tx, { kind: 'transfer.create', key: `transfer:${transferId}:${randomUUID()}`, payload: { transferId } });

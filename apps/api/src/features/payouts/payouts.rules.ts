@@ -12,3 +12,19 @@ const rank: Record<PayoutState, number> = { pending: 0, in_transit: 1, paid: 2, 
 /** States move only forward, whatever order the news comes in. */
 export const isNews = (known: PayoutState | null, heard: PayoutState): boolean =>
   known === null || rank[heard] > rank[known];
+
+const words: [prefix: string, text: string][] = [
+  ['external_account', 'Bank account for payouts'],
+  ['tos_acceptance', 'Agreement with the payment processor'],
+  ['business_type', 'Kind of business'],
+  ['business_profile', 'What your business does'],
+  ['company', 'Details of the company'],
+  ['individual', 'Details of the person'],
+  ['representative', 'Details of the person who signs'],
+  ['owners', 'Details of the owners'],
+];
+
+/** The processor's own names of what it still asks for, in words for the seller, each once. */
+export const requirementWords = (requirements: string[]): string[] => [
+  ...new Set(requirements.map((name) => words.find(([prefix]) => name.startsWith(prefix))?.[1] ?? 'Further details')),
+];
