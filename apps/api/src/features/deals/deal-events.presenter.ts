@@ -84,3 +84,17 @@ export const toEventView = (event: DealEvent, viewer: Viewer, words: Words): Dea
     detail: tell(event.detail, words),
   };
 };
+
+const deskNames: Record<DealActor, string> = {
+  seller: 'Seller',
+  buyer: 'Buyer',
+  market: 'The market',
+  desk: 'The desk',
+};
+
+/** The same for the desk, which is on neither side. */
+export const toDeskEvent = (event: DealEvent): { at: string; by: string; title: string } => ({
+  at: event.at.toISOString(),
+  by: deskNames[event.actor],
+  title: told[event.kind as EventKind][0],
+});

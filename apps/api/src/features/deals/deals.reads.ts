@@ -1,5 +1,5 @@
 import type { DealState, DealView } from '@lydite/contracts';
-import type { EntityManager } from 'typeorm';
+import { In, type EntityManager } from 'typeorm';
 import { AppError } from '../../platform/app-error.ts';
 import { marketNow } from '../../platform/clock.ts';
 import { marketTerms } from '../../platform/market-terms.ts';
@@ -9,6 +9,7 @@ import { lotHeadline } from '../lots/lots.reads.ts';
 import { paymentStanding } from '../payments/payments.reads.ts';
 import { photosOf } from '../photos/photos.reads.ts';
 import { settlementOf } from '../settlements/settlements.reads.ts';
+import { toDeskEvent } from './deal-events.presenter.ts';
 import { toDealView } from './deal-view.presenter.ts';
 import { Claim, Deal, DealEvent } from './deal.entity.ts';
 import type { Side } from './deals.rules.ts';
@@ -78,4 +79,13 @@ export async function nameOf(tx: EntityManager, memberId: string): Promise<{ nam
     memberId,
   ]);
   return rows[0]!;
+}
+
+/** What happened in these deals, oldest first, as the desk reads it. */
+export async function timelinesOf(
+  tx: EntityManager,
+  dealIds: readonly string[],
+): Promise<Map<string, { at: string; by: string; title: string }[]>> {
+  const events = await tx.find(DealEvent, { where: { dealId: In([...dealIds]) }, order: { id: 'ASC' } });
+  return new Map(dealIds.map((id) => [id, events.filter((event) => event.dealId === id).map(toDeskEvent)]));
 }

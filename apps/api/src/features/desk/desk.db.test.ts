@@ -1,0 +1,81 @@
+import { randomUUID } from 'node:crypto';
+import { afterAll, beforeAll, expect, test } from 'vitest';
+import { addMember } from '../../../test/factories.ts';
+import { openMarket, type Caller, type Market } from '../../../test/market.ts';
+import { addOpenLot } from '../../../test/open-lot.ts';
+
+let market: Market;
+let operator: Caller;
+beforeAll(async () => {
+  market = await openMarket();
+  operator = await market.as(await addMember(market, { roles: ['operator'], name: 'Market desk' }));
+});
+afterAll(() => market.close());
+
+test('members are found by name, address and place; papers seen raise the limit and are in the audit log', async () => {
+  const memberId = await addMember(market, { name: 'Vennaby Salvage', place: 'Vennaby', verified: false });
+  const found = (await operator.call('GET /desk/members', { query: { q: 'vennaby sal' } })).body;
+  expect(found).toMatchObject({
+    total: 1,
+    rows: [{ id: memberId, verifiedAt: null, limitMinor: 200_000, payoutAccount: 'none' }],
+  });
+  const body = { limitMinor: 5_000_000, reason: 'Trade licence and passport' };
+  const verified = await operator.call('POST /desk/members/:memberId/verify', { params: { memberId }, body });
+  expect(verified.body).toMatchObject({ limitMinor: 5_000_000, verifiedAt: expect.any(String) });
+  const log = await market.db.query(
+    `select actor_id, reason from audit_log where action = 'member.verify' and object_id = $1`,
+    [memberId],
+  );
+  expect(log).toEqual([{ actor_id: operator.memberId, reason: body.reason }]);
+});
+
+test('nobody sees to their own papers, and an old password entry is not enough', async () => {
+  const body = { limitMinor: 5_000_000, reason: 'Trade licence' };
+  const own = await operator.call('POST /desk/members/:memberId/verify', {
+    params: { memberId: operator.memberId! },
+    body,
+  });
+  expect(own.status).toBe(403);
+  const nobody = await operator.call('POST /desk/members/:memberId/verify', {
+    params: { memberId: randomUUID() },
+    body,
+  });
+  expect(nobody.status).toBe(404);
+  const stale = await market.as(await addMember(market, { roles: ['operator'] }));
+  await market.db.query(`update sessions set fresh_until = market_now() where member_id = $1`, [stale.memberId]);
+  const refused = await stale.call('POST /desk/members/:memberId/verify', { params: { memberId: randomUUID() }, body });
+  expect(refused.problem.code).toBe('session.stale');
+});
+
+test('lots and deals are listed without reserves and ceilings; a search text is no pattern', async () => {
+  const sellerId = await addMember(market, { roles: ['seller'], name: 'Dunnowick Dismantling' });
+  const lot = await addOpenLot(market, { sellerId, askingMinor: 90_000 });
+  const buyer = await market.as(await addMember(market));
+  await buyer.call('POST /lots/:lotCode/take', {
+    params: { lotCode: lot.code },
+    body: { priceMinor: 90_000, attempt: randomUUID() },
+  });
+  const lots = await operator.call('GET /desk/lots', { query: { q: lot.code } });
+  expect(lots.body.rows).toMatchObject([
+    { code: lot.code, seller: 'Dunnowick Dismantling', state: 'awarded', dealCode: expect.stringMatching(/^D-/) },
+  ]);
+  expect(lots.bytes.toString()).not.toMatch(/reserve|ceiling/i);
+  const deals = await operator.call('GET /desk/deals', { query: { q: 'dunnowick' } });
+  expect(deals.body.rows).toMatchObject([
+    {
+      state: 'awaiting_payment',
+      dueWhat: 'Payment into hold',
+      heldMinor: 0,
+      events: [{ title: 'Awarded', by: 'The market' }],
+    },
+  ]);
+  for (const q of ['%', '_', `' or 1=1--`])
+    expect((await operator.call('GET /desk/deals', { query: { q } })).body.total).toBe(0);
+});
+
+test('the outbox shows what is still to do; no queue is shown before a worker ran', async () => {
+  const outbox = (await operator.call('GET /desk/outbox', { query: { q: 'notice.mail' } })).body;
+  expect(outbox.rows.length).toBeGreaterThan(0);
+  expect(outbox.rows[0]).toMatchObject({ kind: 'notice.mail', state: 'pending', attempts: 0 });
+  expect((await operator.call('GET /desk/jobs')).body).toEqual([]);
+});
