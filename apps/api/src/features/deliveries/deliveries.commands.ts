@@ -38,3 +38,12 @@ export async function letDeclaredMassStand(tx: EntityManager, deal: LockedDeal, 
 export const recordCountersign = async (tx: EntityManager, dealId: string, now: Date): Promise<void> => {
   await tx.update(WeighIn, { dealId }, { countersignedAt: now });
 };
+
+/** Lets both sides' time after a weigh-in end later: the deal stood still. */
+export const moveWeighInTimes = async (tx: EntityManager, dealId: string, byMs: number): Promise<void> => {
+  await tx.query(
+    `update weigh_ins set claim_ends_at = claim_ends_at + make_interval(secs => $2), countersign_ends_at = countersign_ends_at + make_interval(secs => $2)
+      where deal_id = $1`,
+    [dealId, byMs / 1000],
+  );
+};
