@@ -1,11 +1,10 @@
 import { catalogue20261, roundSignificant, type MaterialClass, type Parameter, type Quantity } from '@lydite/valuation';
 import { format } from 'prettier';
 import { expect, test } from 'vitest';
-import { ascending } from '../../packages/valuation/src/lot/ascending.ts';
 import { drawPlan } from '../../packages/valuation/src/lot/draw-plan.ts';
 import { line } from '../../packages/valuation/src/lot/line.fixture.ts';
 import { planLot } from '../../packages/valuation/src/lot/plan-lot.ts';
-import { sortedQuantile } from '../../packages/valuation/src/lot/quantiles.ts';
+import { createQuantileFinder } from '../../packages/valuation/src/lot/quantile-finder.ts';
 
 const figure = (value: number) => `${roundSignificant(value, 4)}`;
 
@@ -37,8 +36,10 @@ function grades(classCode: string): string {
   for (const { gold } of plan.lines) {
     for (const term of gold) term.factors = term.factors.filter(({ parameter }) => parameter !== 'identity');
   }
-  const sorted = ascending(drawPlan(plan, { seed: 1, draws: 100_003 }).goldG);
-  return [0.1, 0.5, 0.9].map((probability) => roundSignificant(sortedQuantile(sorted, probability), 2)).join(' / ');
+  const draws = 100_003;
+  const { goldG } = drawPlan(plan, { seed: 1, draws });
+  const quantiles = createQuantileFinder(draws)(goldG, [0.1, 0.5, 0.9]);
+  return quantiles.map((gradeGPerT) => roundSignificant(gradeGPerT, 2)).join(' / ');
 }
 
 const sectionOf = (materialClass: MaterialClass) => `## ${materialClass.name} (\`${materialClass.code}\`)

@@ -2,12 +2,15 @@ import { expect, test } from 'vitest';
 import { quantileOf } from '../quantity/quantile.ts';
 import { lognormal } from '../quantity/quantity.ts';
 import { densityOf } from './density.ts';
+import { createQuantileFinder } from './quantile-finder.ts';
+import { spreadOf } from './quantiles.ts';
 
 const n = 10_000;
-const sorted = Float64Array.from({ length: n }, (_, i) => quantileOf(lognormal(50, 1.6), (i + 0.5) / n));
+const find = createQuantileFinder(n);
+const drawn = Float64Array.from({ length: n }, (_, i) => quantileOf(lognormal(50, 1.6), (i + 0.5) / n));
 
 test('96 bins from p0.15 to p99.85 that hold 99.7 % of the probability', () => {
-  const { fromG, toG, perG } = densityOf(sorted);
+  const { fromG, toG, perG } = densityOf(drawn, spreadOf(drawn, find));
   expect(perG).toHaveLength(96);
   expect(fromG).toBeCloseTo(quantileOf(lognormal(50, 1.6), 0.0015), 0);
   const width = (toG - fromG) / 96;
@@ -15,7 +18,7 @@ test('96 bins from p0.15 to p99.85 that hold 99.7 % of the probability', () => {
 });
 
 test('the peak stands at the mode of the lognormal, at its height', () => {
-  const { fromG, toG, perG } = densityOf(sorted);
+  const { fromG, toG, perG } = densityOf(drawn, spreadOf(drawn, find));
   const sigma = Math.log(1.6);
   const mode = 50 * Math.exp(-(sigma ** 2));
   const height = (1 / (mode * sigma * Math.sqrt(2 * Math.PI))) * Math.exp(-(sigma ** 2) / 2);
@@ -26,5 +29,6 @@ test('the peak stands at the mode of the lognormal, at its height', () => {
 });
 
 test('draws without spread have no density to draw', () => {
-  expect(densityOf(new Float64Array(n).fill(3))).toEqual({ fromG: 3, toG: 3, perG: new Array(96).fill(0) });
+  const same = new Float64Array(n).fill(3);
+  expect(densityOf(same, spreadOf(same, find))).toEqual({ fromG: 3, toG: 3, perG: new Array(96).fill(0) });
 });

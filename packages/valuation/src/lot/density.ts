@@ -1,36 +1,33 @@
-import type { Estimate } from '../types.ts';
-import { meanAndVariance, quantilesOf, sortedQuantile } from './quantiles.ts';
+import type { Estimate, Spread } from '../types.ts';
 
 const bins = 96;
 
 /**
  * Density of the draws on 96 equal bins from p0.15 to p99.85, smoothed by a normal kernel of Silverman's width.
  * Source: B. W. Silverman, Density Estimation for Statistics and Data Analysis, 1986, eq. 3.31.
- * @param sorted ascending draws in grams
+ * @param goldG draws in grams, in any order
+ * @param spread of the same draws
  * @returns probability per gram; all zero when the draws have no spread
  */
-export function densityOf(sorted: Float64Array): Estimate['density'] {
-  const { p0_15: fromG, p99_85: toG } = quantilesOf(sorted);
+export function densityOf(goldG: Float64Array, spread: Spread): Estimate['density'] {
+  const { p0_15: fromG, p99_85: toG } = spread.quantiles;
   const widthG = (toG - fromG) / bins;
   if (!(widthG > 0)) return { fromG, toG, perG: new Array<number>(bins).fill(0) };
-  const counts = countBins(sorted, fromG, widthG);
-  const smooth = smoothed(counts, bandwidthOf(sorted) / widthG);
-  return { fromG, toG, perG: smooth.map((count) => count / (sorted.length * widthG)) };
+  const smooth = smoothed(countBins(goldG, fromG, widthG), bandwidthOf(spread, goldG.length) / widthG);
+  return { fromG, toG, perG: smooth.map((count) => count / (goldG.length * widthG)) };
 }
 
-function countBins(sorted: Float64Array, fromG: number, widthG: number): number[] {
+function countBins(goldG: Float64Array, fromG: number, widthG: number): number[] {
   const counts = new Array<number>(bins).fill(0);
-  for (const value of sorted) {
-    const bin = Math.floor((value - fromG) / widthG);
+  for (let i = 0; i < goldG.length; i += 1) {
+    const bin = Math.floor(((goldG[i] as number) - fromG) / widthG);
     if (bin >= 0 && bin < bins) counts[bin] = (counts[bin] as number) + 1;
   }
   return counts;
 }
 
-function bandwidthOf(sorted: Float64Array): number {
-  const { variance } = meanAndVariance(sorted);
-  const quartiles = (sortedQuantile(sorted, 0.75) - sortedQuantile(sorted, 0.25)) / 1.34;
-  return 0.9 * Math.min(Math.sqrt(variance), quartiles || Infinity) * sorted.length ** -0.2;
+function bandwidthOf({ sd, quantiles: { p25, p75 } }: Spread, draws: number): number {
+  return 0.9 * Math.min(sd, (p75 - p25) / 1.34 || Infinity) * draws ** -0.2;
 }
 
 /** What the kernel carries over an end is reflected back, so no probability is lost. */

@@ -66,8 +66,10 @@ function drawTerm({ constant, factors }: Term, draws: number, columnOf: (factor:
   }
   for (let i = 0; i < draws; i += 1) product[i] = median * Math.exp(product[i] as number);
   for (const each of factors) {
-    if (each.quantity.kind === 'lognormal') continue;
-    multiply(product, valuesOf(each.quantity, each.power, draws), columnOf(each));
+    const { quantity, power } = each;
+    if (quantity.kind === 'lognormal') continue;
+    if (quantity.kind === 'uniform' && power === 1) multiplyUniform(product, quantity, columnOf(each));
+    else multiply(product, valuesOf(quantity, power, draws), columnOf(each));
   }
   return product;
 }
@@ -90,13 +92,26 @@ function multiply(product: Float64Array, values: Float64Array, { generator, shif
   }
 }
 
+/** The most common figure without a table of its values. */
+function multiplyUniform(
+  product: Float64Array,
+  { lo, hi }: { lo: number; hi: number },
+  { generator, shift }: Column,
+): void {
+  const draws = product.length;
+  const step = (hi - lo) / draws;
+  const first = lo + step / 2;
+  for (let i = 0, at = shift; i < draws; i += 1) {
+    product[i] = (product[i] as number) * (first + step * at);
+    at += generator;
+    if (at >= draws) at -= draws;
+  }
+}
+
 /** Equally likely values of the quantity, ascending before the power is taken. */
 function valuesOf(quantity: Quantity, power: number, draws: number): Float64Array {
   const values = new Float64Array(draws);
-  if (quantity.kind === 'uniform') {
-    const step = (quantity.hi - quantity.lo) / draws;
-    for (let i = 0; i < draws; i += 1) values[i] = quantity.lo + step * (i + 0.5);
-  } else if (quantity.kind === 'normal' && quantity.mean > farFromZero * quantity.sd) {
+  if (quantity.kind === 'normal' && quantity.mean > farFromZero * quantity.sd) {
     const scores = normalScores(draws);
     for (let i = 0; i < draws; i += 1) values[i] = quantity.mean + quantity.sd * (scores[i] as number);
   } else {

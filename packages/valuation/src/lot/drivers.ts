@@ -1,11 +1,10 @@
 import type { Catalogue } from '../catalogue/catalogue.types.ts';
 import type { Driver, LineEstimate, LotInput, Quantiles } from '../types.ts';
-import { ascending } from './ascending.ts';
 import { drawPlan } from './draw-plan.ts';
 import type { LinePlan, LotPlan } from './lot-plan.types.ts';
 import { improveLot, measurementOf } from './measurement.ts';
 import { planLot } from './plan-lot.ts';
-import { sortedQuantile } from './quantiles.ts';
+import { createQuantileFinder } from './quantile-finder.ts';
 import { varianceShares, type FactorShare } from './variance.ts';
 
 const mostDrivers = 6;
@@ -63,8 +62,8 @@ function createExpectation({ input, catalogue, plan, seed, lines: estimates }: D
 }
 
 function rangeOf(plan: LotPlan, seed: number, keys: readonly string[]): [number, number] {
-  const sorted = ascending(drawPlan(plan, { seed, draws, keys }).goldG);
-  return [sortedQuantile(sorted, 0.1), sortedQuantile(sorted, 0.9)];
+  const { goldG } = drawPlan(plan, { seed, draws, keys });
+  return createQuantileFinder(draws)(goldG, [0.1, 0.9]) as [number, number];
 }
 
 /** The figures of a lot, each once. */

@@ -1,39 +1,35 @@
 import type { Quantiles, Spread } from '../types.ts';
+import type { FindQuantiles } from './quantile-finder.ts';
 
-/**
- * Quantile of ascending values by linear interpolation (type 7).
- * Source: R. J. Hyndman and Y. Fan, Sample quantiles in statistical packages, The American Statistician 50 (1996) 361–365.
- * @param probability 0 … 1
- */
-export function sortedQuantile(sorted: Float64Array, probability: number): number {
-  const position = (sorted.length - 1) * probability;
-  const below = Math.floor(position);
-  const low = sorted[below] as number;
-  const high = sorted[Math.min(below + 1, sorted.length - 1)] as number;
-  return low + (high - low) * (position - below);
+const percents: Record<keyof Quantiles, number> = {
+  p0_15: 0.15,
+  p01: 1,
+  p05: 5,
+  p10: 10,
+  p25: 25,
+  p50: 50,
+  p75: 75,
+  p90: 90,
+  p95: 95,
+  p99: 99,
+  p99_5: 99.5,
+  p99_85: 99.85,
+};
+const names = Object.keys(percents) as (keyof Quantiles)[];
+const probabilities = names.map((name) => percents[name] / 100);
+
+export function quantilesOf(values: Float64Array, find: FindQuantiles): Quantiles {
+  const found = find(values, probabilities);
+  return Object.fromEntries(names.map((name, i) => [name, found[i]])) as Record<keyof Quantiles, number>;
 }
 
-export function quantilesOf(sorted: Float64Array): Quantiles {
-  const at = (percent: number) => sortedQuantile(sorted, percent / 100);
-  return {
-    p0_15: at(0.15),
-    p01: at(1),
-    p05: at(5),
-    p10: at(10),
-    p25: at(25),
-    p50: at(50),
-    p75: at(75),
-    p90: at(90),
-    p95: at(95),
-    p99: at(99),
-    p99_5: at(99.5),
-    p99_85: at(99.85),
-  };
+export function spreadOf(values: Float64Array, find: FindQuantiles): Spread {
+  const { mean, variance } = meanAndVariance(values);
+  return { mean, sd: Math.sqrt(variance), quantiles: quantilesOf(values, find) };
 }
 
-export function spreadOf(sorted: Float64Array): Spread {
-  const { mean, variance } = meanAndVariance(sorted);
-  return { mean, sd: Math.sqrt(variance), quantiles: quantilesOf(sorted) };
+export function medianOf(values: Float64Array, find: FindQuantiles): number {
+  return find(values, [0.5])[0] as number;
 }
 
 /** Mean and variance (divided by one less than the number of values, as in JCGM 101:2008, 7.6). */

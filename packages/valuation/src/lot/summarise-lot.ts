@@ -1,76 +1,77 @@
 import { quantileOf } from '../quantity/quantile.ts';
-import type { Estimate, LineEstimate, Quantiles } from '../types.ts';
-import { ascending } from './ascending.ts';
+import type { Estimate, LineEstimate } from '../types.ts';
+import type { PlanDraws } from './draw-plan.ts';
 import { densityOf } from './density.ts';
 import { driversOf } from './drivers.ts';
 import type { LinePlan, Term } from './lot-plan.types.ts';
-import { meanAndVariance, quantilesOf, sortedQuantile, spreadOf } from './quantiles.ts';
+import { createQuantileFinder, type FindQuantiles } from './quantile-finder.ts';
+import { meanAndVariance, medianOf, quantilesOf, spreadOf } from './quantiles.ts';
 import type { LotDraws } from './simulate-lot.ts';
 
 /** Goes up whenever the same input could give other numbers. */
 export const modelVersion = '1.0';
 
-const beads = 50;
+const beads = Array.from({ length: 50 }, (_, i) => (i + 0.5) / 50);
 
 /** Sums up the draws of a lot as an estimate: plain JSON, and all that a frozen estimate keeps. */
 export function summariseLot(draws: LotDraws): Estimate {
   const { plan, goldG, massG, seed, catalogue, input } = draws;
-  const sorted = ascending(goldG);
-  const spread = spreadOf(sorted);
-  const lines = summariseLines(draws);
+  const find = createQuantileFinder(draws.draws);
+  const spread = spreadOf(goldG, find);
+  const lines = summariseLines(draws, find);
   return {
     modelVersion,
     catalogueVersion: catalogue.version,
     seed,
     draws: draws.draws,
-    massG: sortedQuantile(ascending(massG), 0.5),
+    massG: medianOf(massG, find),
     goldG: spread,
-    gradeGPerT: gradesOf(goldG, massG),
-    beadsG: Array.from({ length: beads }, (_, i) => sortedQuantile(sorted, (i + 0.5) / beads)),
-    density: densityOf(sorted),
+    gradeGPerT: quantilesOf(fillGrades(new Float64Array(draws.draws), draws), find),
+    beadsG: find(goldG, beads),
+    density: densityOf(goldG, spread),
     lines,
     drivers: driversOf({ input, catalogue, plan, seed, lines, quantiles: spread.quantiles }),
     warnings: plan.warnings,
   };
 }
 
-function summariseLines({ plan, lines, goldG }: LotDraws): LineEstimate[] {
+function summariseLines({ plan, lines, goldG, draws }: LotDraws, find: FindQuantiles): LineEstimate[] {
   const total = meanAndVariance(goldG);
+  const grades = new Float64Array(draws);
   return lines.map((line, index) => {
     const { input, materialClass, gold, mass } = plan.lines[index] as LinePlan;
-    const spread = spreadOf(ascending(line.goldG));
+    const spread = spreadOf(line.goldG, find);
     return {
       id: input.id,
       classCode: materialClass.code,
-      massG: medianOf(mass, line.massG),
+      massG: middleOf(mass, line.massG, find),
       pieces: input.pieces,
       goldG: spread,
-      gradeGPerT: gradesOf(line.goldG, line.massG),
+      gradeGPerT: quantilesOf(fillGrades(grades, line), find),
       varianceShare: total.variance > 0 ? covariance(line.goldG, spread.mean, goldG, total.mean) / total.variance : 0,
       components: gold.map(({ name }, i) => ({
         name,
-        goldG: gold.length === 1 ? spread : spreadOf(ascending(line.components[i] as Float64Array)),
+        goldG: gold.length === 1 ? spread : spreadOf(line.components[i] as Float64Array, find),
       })),
     };
   });
 }
 
 /** Middle of a mass; known without draws, and so to the last digit as it was given, unless it is a product of several figures. */
-function medianOf(mass: Term | null, drawnG: Float64Array): number {
+function middleOf(mass: Term | null, drawnG: Float64Array, find: FindQuantiles): number {
   if (!mass) return 0;
   const [only, ...others] = mass.factors;
-  if (others.length > 0) return sortedQuantile(ascending(drawnG), 0.5);
+  if (others.length > 0) return medianOf(drawnG, find);
   return only ? mass.constant * quantileOf(only.quantity, 0.5) ** only.power : mass.constant;
 }
 
-/** Quantiles of gold over mass, draw by draw, in g/t; 0 where there is no mass. */
-function gradesOf(goldG: Float64Array, massG: Float64Array): Quantiles {
-  const grades = new Float64Array(goldG.length);
+/** Gold over mass, draw by draw, in g/t; 0 where there is no mass. */
+function fillGrades(grades: Float64Array, { goldG, massG }: Pick<PlanDraws, 'goldG' | 'massG'>): Float64Array {
   for (let i = 0; i < grades.length; i += 1) {
     const mass = massG[i] as number;
-    if (mass > 0) grades[i] = ((goldG[i] as number) / mass) * 1e6;
+    grades[i] = mass > 0 ? ((goldG[i] as number) / mass) * 1e6 : 0;
   }
-  return quantilesOf(ascending(grades));
+  return grades;
 }
 
 function covariance(a: Float64Array, meanA: number, b: Float64Array, meanB: number): number {

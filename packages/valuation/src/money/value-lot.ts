@@ -1,7 +1,7 @@
 import { requireBetween, requirePositive } from '../argument.ts';
-import { ascending } from '../lot/ascending.ts';
 import type { PlanDraws } from '../lot/draw-plan.ts';
-import { meanAndVariance, quantilesOf, sortedQuantile } from '../lot/quantiles.ts';
+import { createQuantileFinder } from '../lot/quantile-finder.ts';
+import { meanAndVariance, medianOf, quantilesOf } from '../lot/quantiles.ts';
 import type { Quantiles } from '../types.ts';
 import { requireTerms, type BuyerTerms } from './buyer-terms.ts';
 import { breakEvenGold, breakEvenPayment, netMinor, payableG, returnOf, type Market } from './return.ts';
@@ -36,7 +36,8 @@ export function valueLot(draws: Pick<PlanDraws, 'goldG' | 'massG'>, terms: Buyer
   requirePositive('market.pricePerGMinor', market.pricePerGMinor);
   const worked = returnOf(terms, market);
   const { sorted, means } = workOut(draws, worked);
-  const medianMassG = sortedQuantile(ascending(draws.massG), 0.5);
+  const find = createQuantileFinder(sorted.length);
+  const medianMassG = medianOf(draws.massG, find);
   const netMeanMinor = meanAndVariance(sorted).mean;
   const costOf = (bidMinor: number) => {
     requireBetween('bidMinor', bidMinor, 0);
@@ -49,7 +50,10 @@ export function valueLot(draws: Pick<PlanDraws, 'goldG' | 'massG'>, terms: Buyer
     expectedProfitMinor: (bidMinor) => netMeanMinor - costOf(bidMinor),
     profitQuantilesMinor: (bidMinor) => {
       const cost = costOf(bidMinor);
-      return quantilesOf(sorted.map((net) => net - cost));
+      return quantilesOf(
+        sorted.map((net) => net - cost),
+        find,
+      );
     },
     breakEvenGoldG: (bidMinor) => breakEvenGold(worked, bidMinor, medianMassG),
     breakEvenGradeGPerT: (bidMinor) => {
