@@ -16,6 +16,7 @@ export * from './catalogue/catalogue-2026-1.ts';
 export * from './lot/simulate-lot.ts';
 export * from './lot/summarise-lot.ts';
 export * from './lot/estimate-lot.ts';
+export { likelyMassG } from './lot/likely-mass.ts';
 export * from './round-significant.ts';
 export { defaultTerms, type BuyerTerms } from './money/buyer-terms.ts';
 export * from './money/expected-largest-normal.ts';

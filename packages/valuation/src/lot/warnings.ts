@@ -3,6 +3,7 @@ import { quantileOf } from '../quantity/quantile.ts';
 import { roundSignificant } from '../round-significant.ts';
 import { platingStandards } from '../units/plating-standards.ts';
 import { massQuantity, thicknessQuantity } from './evidence.ts';
+import { isUsualPieceMass, likelyMassG } from './likely-mass.ts';
 import type { LinePlan } from './lot-plan.types.ts';
 import { hasContacts, isSurface } from './plan-gold.ts';
 
@@ -34,10 +35,9 @@ const amountMissing: Check = ({ input, label, mass, gold, materialClass }) => {
 const massPerPiece: Check = ({ input: { massG, pieces, pieceMassG }, materialClass }) => {
   const prior = materialClass.pieceMassG?.quantity;
   if (!massG || !pieces || pieceMassG !== null || prior?.kind !== 'lognormal') return null;
-  const usual = (eachG: number) => Math.abs(Math.log(eachG / prior.median)) <= 3 * Math.log(prior.gsd);
-  if (usual(massG / pieces)) return null;
+  if (isUsualPieceMass(massG / pieces, materialClass)) return null;
   const [least, most] = [prior.median / prior.gsd ** 2, prior.median * prior.gsd ** 2].map(inGrams);
-  const slip = [0.1, 10, 0.001, 1000].map((by) => massG * by).find((otherG) => usual(otherG / pieces));
+  const slip = likelyMassG({ massG, pieces }, materialClass);
   const instead = slip ? ` ${inWords(slip)} would be ${inWords(slip / pieces)} each.` : '';
   const kind = capital(materialClass.unit.many);
   return {
