@@ -35,6 +35,8 @@ const schema = z.object({
   PAYMENTS_API_URL: z.url().optional(),
   PAYMENTS_WEBHOOK_SECRETS: list,
   PRICES_URL: z.url(),
+  /** Age at which a reference price counts as stale, not counting days without a price. */
+  PRICE_STALE_HOURS: z.coerce.number().positive().default(36),
   MARKET_ZONE: z.string().default('Europe/Vienna'),
   MARKET_CURRENCY: z
     .string()

@@ -5,7 +5,7 @@ import { beginDraft, copyLot, deleteDraft, readOwnLot, saveDraft } from './draft
 import { listLot } from './list-lot.ts';
 import { addPhoto, arrangeLotPhotos, assertMayAddPhoto, removeLotPhoto } from './lot-photos.ts';
 import { listMarket } from './market-list.ts';
-import { myLots } from './my-lots.queries.ts';
+import { myLots } from './my-lots.ts';
 import { readLot } from './read-lot.ts';
 import { withdrawLot } from './withdraw-lot.ts';
 
@@ -18,7 +18,7 @@ export function lotRoutes(on: On, world: World): void {
   on('GET /lots', ({ query, actor }) => listMarket(world, { query, actor }));
   on('GET /lots/:lotCode', ({ params, actor }) => readLot(world, { ...params, actor }));
 
-  on('GET /my/lots', ({ actor }) => myLots(world.db.manager, actor.id));
+  on('GET /my/lots', ({ actor }) => myLots(world, actor.id));
   on('POST /my/lots', ({ actor }) => beginDraft(world, actor.id));
   on('GET /my/lots/:lotCode', (call) => readOwnLot(world, own(call)));
   on('PUT /my/lots/:lotCode', (call) => saveDraft(world, { ...own(call), ...call.body }));

@@ -1,6 +1,5 @@
 import type { MyLotRow } from '@lydite/contracts';
 import type { EntityManager } from 'typeorm';
-import { marketNow } from '../../platform/clock.ts';
 import { dutyOf, type DutyFacts } from './duty.rules.ts';
 
 interface Row extends DutyFacts {
@@ -37,8 +36,11 @@ const sql = `
    order by "updatedAt" desc, l.id limit 500`;
 
 /** A seller's lots, drafts included, the last touched first. */
-export async function myLots(tx: EntityManager, sellerId: string): Promise<MyLotRow[]> {
-  const rows: Row[] = await tx.query(sql, [sellerId, await marketNow(tx)]);
+export async function myLotRows(
+  tx: EntityManager,
+  { sellerId, now }: { sellerId: string; now: Date },
+): Promise<MyLotRow[]> {
+  const rows: Row[] = await tx.query(sql, [sellerId, now]);
   return rows.map(toMyLotRow);
 }
 

@@ -10,7 +10,7 @@ import { catalogueVersion } from '../catalogue/catalogue.reads.ts';
 import { dealViewOf } from '../deals/deals.reads.ts';
 import { estimateOf } from '../estimates/estimates.reads.ts';
 import { photosOf } from '../photos/photos.reads.ts';
-import { priceInForce, toReferencePrice } from '../prices/prices.reads.ts';
+import { priceInForce, staleRuleOf, toReferencePrice } from '../prices/prices.reads.ts';
 import { lotChain } from './lot-chain.presenter.ts';
 import { findListedLot, ownDealCode, sellerRecord } from './lot-view.queries.ts';
 import { LotLine, type Lot } from './lot.entity.ts';
@@ -32,7 +32,7 @@ export async function readLot(
     lines: await publicLines(tx, lot.id, catalogue),
     photos: await photosOf(tx, { lotId: lot.id }),
     estimate,
-    price: toReferencePrice((await priceInForce(tx))!),
+    price: toReferencePrice((await priceInForce(tx, staleRuleOf(settings)))!),
     leastNextMinor: takesBids(lot, now)
       ? leastNextMinor({ ...lot, startMinor: lot.startMinor! }, actor?.id ?? null)
       : null,

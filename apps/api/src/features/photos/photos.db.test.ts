@@ -1,11 +1,14 @@
-import { readdir } from 'node:fs/promises';
+import { randomUUID } from 'node:crypto';
+import { readdir, writeFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import sharp from 'sharp';
 import { afterAll, beforeAll, expect, test, vi } from 'vitest';
+import { completeDraft } from '../../../test/lot-drafts.ts';
 import { addDraft, addListedLot, addPrice, addSeller } from '../../../test/listed-lots.ts';
 import { addMember } from '../../../test/factories.ts';
 import { openMarket, type Caller, type Market } from '../../../test/market.ts';
 import { fortyMegabytes, hugePng, phonePhoto, photoForm, plainPhoto, svgDrawing } from '../../../test/photo-files.ts';
+import { storePhoto } from './photos.commands.ts';
 
 let market: Market;
 let seller: Caller;
@@ -171,4 +174,29 @@ test('photos of a listed lot are public, those of a draft are the owner’s and 
   }
   const late = await add(listed, await plainPhoto());
   expect([late.status, late.problem.code]).toEqual([409, 'lot.wrong_state']);
+});
+
+test('photos of a deal are seen by its two sides and the desk only', async () => {
+  const { form: _form, ...terms } = completeDraft().sale;
+  const lotCode = await addListedLot(seller, { sale: { ...terms, form: 'asking-price', askingMinor: 9000 } });
+  const buyer = await market.as(await addMember(market));
+  const body = { priceMinor: 9000, attempt: randomUUID() };
+  const { body: taken } = await buyer.call('POST /lots/:lotCode/take', { params: { lotCode }, body });
+  const [deal]: { id: string }[] = await market.db.query('select id from deals where code = $1', [taken.dealCode]);
+  const path = join(market.world.settings.FILES_DIR, 'scale.jpg');
+  await writeFile(path, await plainPhoto());
+  const photo = await storePhoto(market.world, {
+    ownerId: buyer.memberId!,
+    dealId: deal!.id,
+    slot: 'on-scale',
+    upload: { path },
+  });
+  const desk = await market.as(await addMember(market, { roles: ['operator'] }));
+  for (const side of [buyer, seller, desk]) {
+    const { status, headers } = await read(side, photo.id);
+    expect([status, headers.get('cache-control')]).toEqual([200, 'private, max-age=31536000, immutable']);
+  }
+  const stranger = await market.as(await addMember(market, { roles: ['buyer', 'seller'] }));
+  for (const other of [stranger, market.visitor()])
+    expect((await read(other, photo.id)).problem.code).toBe('photo.not_found');
 });

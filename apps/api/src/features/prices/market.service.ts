@@ -3,7 +3,7 @@ import { z } from 'zod';
 import { marketNow } from '../../platform/clock.ts';
 import type { World } from '../../platform/world.ts';
 import type { Settings } from '../../settings.ts';
-import { priceInForce, toReferencePrice } from './prices.reads.ts';
+import { priceInForce, staleRuleOf, toReferencePrice } from './prices.reads.ts';
 
 const signIns = z.array(z.object({ role: z.string(), email: z.string() }));
 
@@ -13,7 +13,7 @@ export function createMarketService({ db, settings }: Pick<World, 'db' | 'settin
   return {
     async read(): Promise<MarketView> {
       const now = await marketNow(db.manager);
-      const price = await priceInForce(db.manager);
+      const price = await priceInForce(db.manager, staleRuleOf(settings));
       const fees: { buyerFeeBp: number; sellerFeeBp: number }[] = await db.query(
         `select buyer_fee_bp as "buyerFeeBp", seller_fee_bp as "sellerFeeBp" from fee_schedules
           where from_day <= ($1::timestamptz at time zone $2)::date order by from_day desc limit 1`,

@@ -4,6 +4,8 @@ import { marketNow } from '../../platform/clock.ts';
 import { defaultStaleRule, isStale, type StaleRule } from './prices.rules.ts';
 import { ReferencePriceRow } from './reference-price.entity.ts';
 
+export { staleRuleOf } from './prices.rules.ts';
+
 export interface PriceInForce {
   id: string;
   /** Minor units per fine gram, with fractions of a minor unit. */

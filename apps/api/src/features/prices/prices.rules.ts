@@ -7,6 +7,12 @@ export interface StaleRule {
 
 export const defaultStaleRule: StaleRule = { afterHours: 36, idleWeekdays: [0, 6] };
 
+/** The market's own rule, by its settings. */
+export const staleRuleOf = ({ PRICE_STALE_HOURS }: { PRICE_STALE_HOURS: number }): StaleRule => ({
+  ...defaultStaleRule,
+  afterHours: PRICE_STALE_HOURS,
+});
+
 const hourMs = 3_600_000;
 const dayMs = 24 * hourMs;
 
