@@ -1,11 +1,18 @@
 export { ApiError, isApiError } from './call/api-error.ts';
 export { addressOf, call, type Request } from './call/call.ts';
 export { upload } from './call/upload.ts';
+export { dealRoutes } from './deals/deal-routes.tsx';
+export { Refusal } from './form/Refusal.tsx';
+export { catalogueQuery, marketQuery, useMarket, type Market } from './market/market.queries.ts';
+export { useNow } from './market/use-now.ts';
+export { useWords, type Words } from './market/use-words.ts';
+export { shrinkPhoto } from './photos/shrink-photo.ts';
 export { createQueryClient } from './query-client.ts';
 export { withFreshPassword } from './session/fresh-call.ts';
 export { hasRole, sessionKey, sessionQuery, useMember, useSignIn, useSignOut } from './session/session.queries.ts';
 export { announce } from './shell/announce.ts';
 export type { ClientApp } from './shell/client-app.ts';
+export { OriginLink } from './shell/OriginLink.tsx';
 export { mountApp } from './shell/mount-app.tsx';
 export { RequireRole } from './shell/RequireRole.tsx';
 export { useTitle } from './shell/use-title.ts';

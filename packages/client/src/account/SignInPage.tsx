@@ -1,34 +1,42 @@
-import { Button, ErrorSummary, Page, TextField } from '@lydite/ui';
+import { Button, Page, TextField } from '@lydite/ui';
 import { useState, type FormEvent } from 'react';
 import { Link, useNavigate, useSearchParams } from 'react-router-dom';
+import { isApiError } from '../call/api-error.ts';
+import { Refusal } from '../form/Refusal.tsx';
 import { useSignIn } from '../session/session.queries.ts';
+import { otherHome, useApp } from '../shell/app-context.ts';
 import { useTitle } from '../shell/use-title.ts';
-
-/** Only a path of this client is followed: `?next=https://elsewhere` goes home. */
-export const safeNext = (next: string | null): string => (next && /^\/(?![/\\])/.test(next) ? next : '/');
+import { DemoSignIns, MailboxLink } from './DemoHelp.tsx';
+import { safeNext } from './safe-next.ts';
 
 export function Component() {
   const signIn = useSignIn();
   const navigate = useNavigate();
+  const { app } = useApp();
   const [search] = useSearchParams();
   const [email, setEmail] = useState('');
   const [password, setPassword] = useState('');
-  const failed = signIn.error?.message;
-  useTitle('Sign in', { invalid: Boolean(failed) });
+  useTitle('Sign in', { invalid: signIn.isError });
 
   const submit = (event: FormEvent) => {
     event.preventDefault();
+    const next = search.get('next');
     signIn.mutate(
-      { email, password },
-      { onSuccess: () => void navigate(safeNext(search.get('next')), { replace: true }) },
+      { email: email.trim(), password },
+      {
+        onSuccess: ({ member }) => {
+          const elsewhere = next || !member ? null : otherHome(app, member.roles);
+          if (elsewhere) location.assign(elsewhere);
+          else void navigate(safeNext(next), { replace: true });
+        },
+      },
     );
   };
 
   return (
     <Page shape="narrow">
       <h1>Sign in</h1>
-      {failed && <ErrorSummary problems={[{ message: failed, fieldId: 'email' }]} />}
-      <form onSubmit={submit} noValidate className="mt-6 grid gap-5">
+      <form onSubmit={submit} noValidate className="fields mt-6 max-w-md">
         <TextField
           id="email"
           label="E-mail"
@@ -38,20 +46,24 @@ export function Component() {
           onChange={(event) => setEmail(event.target.value)}
         />
         <TextField
+          id="password"
           label="Password"
           type="password"
           autoComplete="current-password"
           value={password}
           onChange={(event) => setPassword(event.target.value)}
         />
-        <div className="actions">
-          <Button look="primary" type="submit" busy={signIn.isPending && 'Signing in'}>
-            Sign in
-          </Button>
-          <Link to="/forgot">Forgot the password?</Link>
-          <Link to="/register">Register</Link>
-        </div>
+        <Refusal>{signIn.error?.message}</Refusal>
+        {isApiError(signIn.error, 'session.email_unconfirmed') && <MailboxLink />}
+        <Button look="primary" type="submit" className="justify-self-start" busy={signIn.isPending && 'Signing in'}>
+          Sign in
+        </Button>
       </form>
+      <p className="mt-6 flex flex-wrap gap-x-6 gap-y-2">
+        <Link to="/forgot">Forgot the password?</Link>
+        <Link to="/register">Register</Link>
+      </p>
+      <DemoSignIns onChoose={setEmail} />
     </Page>
   );
 }

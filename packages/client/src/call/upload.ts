@@ -1,5 +1,5 @@
 import type { AnswerOf, ParamsOf, Route } from '@lydite/contracts';
-import { ApiError, networkError } from './api-error.ts';
+import { networkError, type ApiError } from './api-error.ts';
 import { addressOf, read } from './call.ts';
 import { renewIfDue } from './renew.ts';
 

@@ -10,25 +10,37 @@ interface MemberMenuProps {
   others: readonly { href: string; label: string }[];
 }
 
+const close = (box: HTMLDetailsElement | null): void => box?.removeAttribute('open');
+
 /** Notices, and under the member's name: the other clients, the account, and the way out. */
 export function MemberMenu({ member, unread, others }: MemberMenuProps) {
   const box = useRef<HTMLDetailsElement>(null);
   const { pathname } = useLocation();
   const signOut = useSignOut();
   const navigate = useNavigate();
+  useEffect(() => close(box.current), [pathname]);
   useEffect(() => {
-    box.current?.removeAttribute('open');
-  }, [pathname]);
+    const onKey = (event: KeyboardEvent) => event.key === 'Escape' && close(box.current);
+    const onPress = (event: PointerEvent) => {
+      if (!box.current?.contains(event.target as Node)) close(box.current);
+    };
+    document.addEventListener('keydown', onKey);
+    document.addEventListener('pointerdown', onPress);
+    return () => {
+      document.removeEventListener('keydown', onKey);
+      document.removeEventListener('pointerdown', onPress);
+    };
+  }, []);
   return (
     <>
       <Link to="/notices">{unread > 0 ? `Notices (${unread})` : 'Notices'}</Link>
-      <details
-        className="menu"
-        ref={box}
-        onKeyDown={(event) => event.key === 'Escape' && box.current?.removeAttribute('open')}
-      >
-        <summary>{member.name}</summary>
+      <details className="menu" ref={box}>
+        <summary>
+          <span className="wide-only">{member.name}</span>
+          <span className="phone-only">Menu</span>
+        </summary>
         <ul className="menu-list">
+          <li className="phone-only small mute px-4 py-3">{member.name}</li>
           {others.map(({ href, label }) => (
             <li key={href}>
               <a href={href}>{label}</a>

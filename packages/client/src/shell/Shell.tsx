@@ -1,7 +1,8 @@
 import { AppBar } from '@lydite/ui';
-import { useQuery } from '@tanstack/react-query';
-import { useEffect, useRef, useState } from 'react';
+import { usePrefetchQuery, useQuery } from '@tanstack/react-query';
+import { Suspense, useEffect, useRef, useState } from 'react';
 import { Link, NavLink, Outlet, ScrollRestoration, useLocation } from 'react-router-dom';
+import { marketQuery } from '../market/market.queries.ts';
 import { sessionQuery } from '../session/session.queries.ts';
 import { onAnnouncement } from './announce.ts';
 import { clientsOf, type ClientApp } from './client-app.ts';
@@ -10,6 +11,7 @@ import { PasswordDialog } from './PasswordDialog.tsx';
 
 /** The frame of every page: bar, content, the one status node, the password dialog. */
 export function Shell({ app, roleWord, nav }: Pick<ClientApp, 'app' | 'roleWord' | 'nav'>) {
+  usePrefetchQuery(marketQuery);
   const { data: session } = useQuery(sessionQuery);
   const member = session?.member ?? null;
   const signedIn = member && nav.length > 0;
@@ -49,7 +51,9 @@ export function Shell({ app, roleWord, nav }: Pick<ClientApp, 'app' | 'roleWord'
           )
         }
       />
-      <Outlet />
+      <Suspense>
+        <Outlet />
+      </Suspense>
       <Status />
       <PasswordDialog />
       <ScrollRestoration />
