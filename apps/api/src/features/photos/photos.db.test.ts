@@ -8,6 +8,7 @@ import { addDraft, addListedLot, addPrice, addSeller } from '../../../test/liste
 import { addMember } from '../../../test/factories.ts';
 import { openMarket, type Caller, type Market } from '../../../test/market.ts';
 import { fortyMegabytes, hugePng, phonePhoto, photoForm, plainPhoto, svgDrawing } from '../../../test/photo-files.ts';
+import { clientHeader } from '../../platform/guards.ts';
 import { storePhoto } from './photos.commands.ts';
 
 let market: Market;
@@ -101,11 +102,27 @@ test.each<[string, () => Buffer | Promise<Buffer>, string, number, string, RegEx
   expect((await read(seller, after.body.photos[0]!.id)).status).toBe(200);
 });
 
-test('nothing stays in quarantine, whether a photo was taken or refused', async () => {
-  await vi.waitFor(
-    async () => expect(await readdir(join(market.world.settings.FILES_DIR, 'quarantine'))).toEqual([]),
-    5000,
-  );
+test('nothing stays in quarantine, whether a photo was taken, refused or given up half way', async () => {
+  const { lotCode } = await addDraft(seller);
+  const leaving = new AbortController();
+  const half = new ReadableStream({
+    start(body) {
+      body.enqueue(Buffer.from('--b\r\ncontent-disposition: form-data; name="photo"; filename="a.jpg"\r\n\r\n'));
+      body.enqueue(Buffer.alloc(300_000, 0xff));
+    },
+  });
+  const sent = seller.fetch(`/api/my/lots/${lotCode}/photos`, {
+    method: 'POST',
+    body: half,
+    signal: leaving.signal,
+    headers: { 'content-type': 'multipart/form-data; boundary=b', [clientHeader]: 'test' },
+    ...{ duplex: 'half' },
+  });
+  const quarantine = join(market.world.settings.FILES_DIR, 'quarantine');
+  await vi.waitFor(async () => expect(await readdir(quarantine)).toHaveLength(1), 5000);
+  leaving.abort();
+  await expect(sent).rejects.toThrow('abort');
+  await vi.waitFor(async () => expect(await readdir(quarantine)).toEqual([]), 5000);
 });
 
 test('no file, a wrong field and an unknown slot are answered as bad requests', async () => {
