@@ -17,7 +17,6 @@ const gradients = [
   gradient('mask-red', ['#8c2f2b', '#742421', '#591816']),
   gradient('mask-brown', ['#b28a52', '#9d7641', '#835f32']),
   gradient('plastic', ['#44474a', '#2f3133', '#232527', '#1b1c1e'], down),
-  gradient('plastic-side', ['#1d1e20', '#0f1011'], down),
   gradient('gold', ['#b98b34', '#f4d88c', '#d9ad55', '#a67b2d'], down),
   gradient('gold-bright', ['#e9c771', '#fff1c4', '#e3bb63', '#c0923d'], down),
   gradient('gold-dull', ['#8f6a29', '#bd9344', '#a27a33', '#77571f'], down),

@@ -21,7 +21,7 @@ export function networkBoards() {
     for (let index = 0; index < 8; index += 1) board.put(jack(), -width / 2 + 110 + index * 62, -height / 2 + 38);
     board.put(heatSink(104, 104, { fins: 9 }), -180, 10);
     board.put(heatSink(80, 80, { fins: 7, fill: '#2c2f31', dark: '#111' }), 40, 20);
-    board.put(gridChip(74, { label: ['HB 5300', '0922'] }), 180, 0);
+    board.put(gridChip(74, { label: ['HB 3160', '0922'] }), 180, 0);
     for (let index = 0; index < 4; index += 1)
       board.put(dualChip(70, 30, { label: ['VM 09', '0908'], leads: 16 }), 310, -60 + index * 46);
     for (let index = 0; index < 4; index += 1)

@@ -23,7 +23,7 @@ function serverBoard(random) {
     board.put(slot(index % 2 ? 300 : 210, { fill: '#24272a', thick: 19 }), -390, 180 + index * 42);
   board.put(heatSink(120, 120, { fins: 11 }), -60, 260);
   board.put(heatSink(80, 80), 120, 330);
-  board.put(gridChip(80, { label: ['OS 5520', '1043'] }), 250, 230);
+  board.put(gridChip(80, { label: ['OS 4170', '1043'] }), 250, 230);
   for (let index = 0; index < 10; index += 1) board.put(choke(34), -330 + index * 44 + (index > 4 ? 250 : 0), -350);
   board.put(header(12, 2, { pitch: 13, fill: '#e6e2d6' }), 470, 300);
   board.put(header(4, 2, { pitch: 15 }), 480, 370);
