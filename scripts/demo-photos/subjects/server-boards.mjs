@@ -28,7 +28,7 @@ function serverBoard(random) {
   board.put(header(12, 2, { pitch: 13, fill: '#e6e2d6' }), 470, 300);
   board.put(header(4, 2, { pitch: 15 }), 480, 370);
   for (let index = 0; index < 6; index += 1)
-    board.put(header(4, 1, { pitch: 16, fill: '#b8452f' }), 370, 180 + index * 34);
+    board.put(header(4, 1, { pitch: 16, fill: '#b8452f' }), 346, 180 + index * 34);
   board.put(emptyCellHolder(32), 30, 400);
   board.scatter(26, () => canCapacitor(11));
   fillBoard(board, random, { chips: 40, small: 320, label: ['OS 31', '1043'] });
