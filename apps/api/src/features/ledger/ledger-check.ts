@@ -13,15 +13,18 @@ type Check = LedgerReport['checks'][number];
 
 const dayMs = 86_400_000;
 
-/** Proves that the books balance in themselves, with the deals, and with the processor. Changes nothing. */
-export async function checkLedger({ db, payments }: Parts): Promise<LedgerReport> {
+/**
+ * Proves that the books balance in themselves, with the deals, and with the processor. Changes nothing. What moved at the
+ * processor within `patienceMs` and is not posted yet counts as on its way.
+ */
+export async function checkLedger({ db, payments }: Parts, { patienceMs = 120_000 } = {}): Promise<LedgerReport> {
   const { books, checks, words } = await db.transaction('REPEATABLE READ', async (tx) => ({
     books: await readBooks(tx, matchedDays + 2 * marginDays),
     checks: await checkBooks(tx),
     words: createWords(await marketTerms(tx)),
   }));
   const processor = await askProcessor(payments, books.now);
-  if (processor) checks.push(...checkProcessor({ books, words, ...processor }));
+  if (processor) checks.push(...checkProcessor({ books, words, patienceMs, ...processor }));
   else checks.push({ name: 'The payment processor answers', ok: false, detail: 'It does not answer.' });
   return {
     checkedAt: books.now.toISOString(),
@@ -65,8 +68,14 @@ async function askProcessor(payments: World['payments'], now: Date): Promise<Pro
   }
 }
 
-function checkProcessor({ books, balance, seen, words }: ProcessorSide & { books: Books; words: Words }): Check[] {
-  const { missing, unknown, onItsWayMinor } = compareMovements({ seen, ...books });
+interface BothSides extends ProcessorSide {
+  books: Books;
+  words: Words;
+  patienceMs: number;
+}
+
+function checkProcessor({ books, balance, seen, words, patienceMs }: BothSides): Check[] {
+  const { missing, unknown, onItsWayMinor } = compareMovements({ seen, patienceMs, ...books });
   const theirsMinor = balance.availableMinor + balance.pendingMinor;
   const offMinor = books.processorMinor + onItsWayMinor - theirsMinor;
   const onItsWay = onItsWayMinor === 0 ? '' : `, ${words.money(onItsWayMinor)} on its way into the books`;

@@ -17,6 +17,7 @@ const compare = (seen: BalanceTransaction[], posted: string[], postedAgeS = 60) 
     seen,
     posted: posted.map((transactionId) => ({ transactionId, at: new Date(now.getTime() - postedAgeS * 1000) })),
     now,
+    patienceMs: 120_000,
   });
 
 test('what is on both sides is no difference', () => {

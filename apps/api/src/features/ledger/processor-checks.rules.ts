@@ -6,9 +6,6 @@ const dayMs = 86_400_000;
 export const matchedDays = 30;
 /** How much further back the other side of a match may lie. */
 export const marginDays = 5;
-/** A movement this young may still be on its way into the books. */
-const onItsWayMs = 120_000;
-
 export interface Movements {
   /** The processor's balance transactions of the matched days and the margin before them. */
   seen: BalanceTransaction[];
@@ -16,6 +13,8 @@ export interface Movements {
   posted: { transactionId: string; at: Date }[];
   /** When the books were read; the processor was asked after that. */
   now: Date;
+  /** A movement no further than this from now may still be on its way into the books. */
+  patienceMs: number;
 }
 
 export interface Comparison {
@@ -28,11 +27,11 @@ export interface Comparison {
 }
 
 /** Matches the processor's movements with the ledger's postings, one to one. */
-export function compareMovements({ seen, posted, now }: Movements): Comparison {
+export function compareMovements({ seen, posted, now, patienceMs }: Movements): Comparison {
   const seenIds = new Set(seen.map(({ id }) => id));
   const postedIds = new Set(posted.map(({ transactionId }) => transactionId));
   const unposted = seen.filter(({ id }) => !postedIds.has(id));
-  const isYoung = ({ at }: BalanceTransaction): boolean => now.getTime() - at.getTime() < onItsWayMs;
+  const isYoung = ({ at }: BalanceTransaction): boolean => Math.abs(now.getTime() - at.getTime()) < patienceMs;
   const isMatched = ({ at }: { at: Date }): boolean => now.getTime() - at.getTime() < matchedDays * dayMs;
   return {
     missing: unposted.filter((one) => !isYoung(one)),
