@@ -1,5 +1,6 @@
 export { ApiError, isApiError } from './call/api-error.ts';
 export { addressOf, call, type Request } from './call/call.ts';
+export { railSteps } from './deals/parts/deal-chain.ts';
 export { upload } from './call/upload.ts';
 export { dealRoutes } from './deals/deal-routes.tsx';
 export { Refusal } from './form/Refusal.tsx';

@@ -1,4 +1,5 @@
 import { Button, TextField } from '@lydite/ui';
+import { useMutation } from '@tanstack/react-query';
 import { useEffect, useRef, useState, type FormEvent } from 'react';
 import { call } from '../call/call.ts';
 import { registerPasswordDialog } from '../session/fresh-call.ts';
@@ -7,8 +8,15 @@ import { registerPasswordDialog } from '../session/fresh-call.ts';
 export function PasswordDialog() {
   const dialog = useRef<HTMLDialogElement>(null);
   const settle = useRef<{ resolve: () => void; reject: (error: Error) => void } | null>(null);
-  const [error, setError] = useState<string | null>(null);
   const [password, setPassword] = useState('');
+  const { mutate, reset, error, isPending } = useMutation({
+    mutationFn: () => call('POST /session/password', { body: { password } }),
+    onSuccess: () => {
+      settle.current?.resolve();
+      settle.current = null;
+      dialog.current?.close();
+    },
+  });
 
   useEffect(
     () =>
@@ -16,24 +24,17 @@ export function PasswordDialog() {
         () =>
           new Promise((resolve, reject) => {
             settle.current = { resolve, reject };
-            setError(null);
+            reset();
             setPassword('');
             dialog.current?.showModal();
           }),
       ),
-    [],
+    [reset],
   );
 
-  const submit = async (event: FormEvent) => {
+  const submit = (event: FormEvent) => {
     event.preventDefault();
-    try {
-      await call('POST /session/password', { body: { password } });
-      settle.current?.resolve();
-      settle.current = null;
-      dialog.current?.close();
-    } catch (refusal) {
-      setError((refusal as Error).message);
-    }
+    mutate();
   };
 
   const closed = () => {
@@ -43,19 +44,21 @@ export function PasswordDialog() {
 
   return (
     <dialog ref={dialog} className="dialog" aria-labelledby="password-title" onClose={closed}>
-      <form onSubmit={(event) => void submit(event)}>
-        <h2 id="password-title">Enter your password again</h2>
-        <p className="small mute">Money moves with the next step. We ask once in ten minutes.</p>
+      <form onSubmit={submit} className="fields">
+        <div>
+          <h2 id="password-title">Enter your password again</h2>
+          <p className="small mute">Money moves with the next step. We ask once in ten minutes.</p>
+        </div>
         <TextField
           label="Password"
           type="password"
           autoComplete="current-password"
           value={password}
-          error={error}
+          error={error?.message ?? null}
           onChange={(event) => setPassword(event.target.value)}
         />
-        <div className="actions">
-          <Button look="primary" type="submit">
+        <div className="flex gap-3">
+          <Button look="primary" type="submit" busy={isPending && 'Checking'}>
             Go on
           </Button>
           <Button look="quiet" type="button" onClick={() => dialog.current?.close()}>

@@ -88,12 +88,10 @@ function Status() {
 /** After a change of page the title gets the focus, so that a keyboard goes on from there and a reader hears where it is. */
 function useFocusOnNavigation(): void {
   const { pathname } = useLocation();
-  const first = useRef(true);
+  const last = useRef(pathname);
   useEffect(() => {
-    if (first.current) {
-      first.current = false;
-      return;
-    }
+    if (last.current === pathname) return;
+    last.current = pathname;
     const title = document.querySelector<HTMLElement>('main h1');
     title?.setAttribute('tabindex', '-1');
     title?.focus({ preventScroll: true });

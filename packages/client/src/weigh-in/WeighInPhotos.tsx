@@ -14,6 +14,9 @@ interface WeighInPhotosProps {
   onRemove: (id: string) => void;
 }
 
+const pick =
+  'btn has-[:focus-visible]:outline-3 has-[:focus-visible]:outline-offset-2 has-[:focus-visible]:outline-action';
+
 /** Kinds that every browser can hand over; phones turn their own into one of them. */
 const accept = 'image/jpeg,image/png,image/webp';
 
@@ -33,11 +36,11 @@ export function WeighInPhotos({ photos, pending, error, onAdd, onRetry, onDrop, 
       </p>
       {error && <FieldError id={errorId}>{error}</FieldError>}
       <div className="flex flex-wrap gap-3">
-        <label className="btn">
+        <label className={pick}>
           Take a photo
           <input type="file" accept={accept} capture="environment" className="sr-only" onChange={choose} />
         </label>
-        <label className="btn">
+        <label className={pick}>
           Choose photos
           <input type="file" accept={accept} multiple className="sr-only" onChange={choose} />
         </label>

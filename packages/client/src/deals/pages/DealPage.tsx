@@ -54,7 +54,7 @@ export function Component() {
             )
           }
         />
-        <div className="mt-7 grid gap-x-12 lg:grid-cols-[minmax(0,1fr)_21rem]">
+        <div className="mt-7 grid gap-x-12 lg:grid-cols-[minmax(0,1fr)_21rem] lg:grid-rows-[auto_1fr]">
           <div>
             <div className="grid gap-4">
               <PaymentNotice deal={deal} />
@@ -62,11 +62,11 @@ export function Component() {
             </div>
             {deal.settlement && <SettlementSection deal={deal} settlement={deal.settlement} />}
             {deal.weighIn && <WeighInSection deal={deal} weighIn={deal.weighIn} />}
-            <Timeline events={deal.events} />
           </div>
-          <aside className="mt-10 lg:mt-0">
+          <aside className="mt-10 lg:row-span-2 lg:mt-0">
             <Terms deal={deal} />
           </aside>
+          <Timeline events={deal.events} />
         </div>
       </div>
     </Page>
@@ -81,9 +81,6 @@ function Terms({ deal }: { deal: DealView }) {
       <section aria-labelledby="money-title">
         <h2 id="money-title">Money</h2>
         <MoneyTable caption="Money" rows={moneyRows(deal)} />
-        {side === 'seller' && (
-          <p className="tiny mute mt-2">The buyer pays freight and own fee on top, into the hold.</p>
-        )}
       </section>
       <section aria-labelledby="delivery-title" className="mt-8">
         <h2 id="delivery-title">Delivery</h2>

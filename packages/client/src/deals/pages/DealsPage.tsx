@@ -52,7 +52,7 @@ function Group({ title, deals }: { title: string; deals: readonly DealRow[] }) {
         {deals.map((deal) => (
           <li
             key={deal.code}
-            className="grid gap-x-8 gap-y-2 md:grid-cols-[minmax(0,5fr)_minmax(0,4fr)_minmax(8rem,auto)] md:items-center"
+            className="grid gap-x-8 gap-y-2 md:grid-cols-[minmax(0,5fr)_minmax(0,4fr)_13rem] md:items-center"
           >
             <div className="lot-cell">
               <LotThumb photoId={deal.coverPhotoId} />

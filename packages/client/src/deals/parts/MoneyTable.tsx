@@ -14,7 +14,7 @@ export interface MoneyRow {
 export function MoneyTable({ caption, rows }: { caption: string; rows: readonly MoneyRow[] }) {
   const { currency } = useMarket();
   return (
-    <table className="table money-table">
+    <table className="table">
       <caption className="sr-only">{caption}</caption>
       <tbody>
         {rows.map(({ label, detail, amountMinor, total }) => (
@@ -23,7 +23,7 @@ export function MoneyTable({ caption, rows }: { caption: string; rows: readonly 
               {label}
               {detail && <small className="block tiny mute font-normal">{detail}</small>}
             </th>
-            <td className="r">
+            <td className={total ? 'r font-medium!' : 'r'}>
               <MoneyText amountMinor={amountMinor} currency={currency} cents="always" />
             </td>
           </tr>

@@ -19,7 +19,9 @@ export function WeighInSection({ deal, weighIn }: { deal: DealView; weighIn: Wei
       {isShort && weighIn.claimableMinor > 0 && (
         <div className="mt-3">
           <Notice tone="warn">
-            A claim takes {exactMoney(deal.claim?.adjustmentMinor ?? weighIn.claimableMinor)} off the price.
+            {deal.claim
+              ? `The claim takes ${exactMoney(deal.claim.adjustmentMinor)} off the price.`
+              : `A claim would take ${exactMoney(weighIn.claimableMinor)} off the price.`}
           </Notice>
         </div>
       )}
@@ -77,6 +79,6 @@ export function WeighInSection({ deal, weighIn }: { deal: DealView; weighIn: Wei
 function differenceWords({ differenceG, declaredG, toleranceG }: WeighInView): string {
   if (differenceG === 0) return 'just as declared.';
   const share = formatShare(Math.abs(differenceG) / declaredG, 2);
-  const by = `${formatMassG(Math.abs(differenceG))}, ${share}, ${differenceG < 0 ? 'short' : 'more'}`;
+  const by = `${formatMassG(Math.abs(differenceG))} (${share}) ${differenceG < 0 ? 'short' : 'more'}`;
   return Math.abs(differenceG) <= toleranceG ? `${by}, within the tolerance.` : `${by}, beyond the tolerance.`;
 }
