@@ -1,6 +1,6 @@
 import { dealState, type DealState } from '@lydite/contracts';
 import { describe, expect, test } from 'vitest';
-import { AppError } from '../../platform/app-error.ts';
+import type { AppError } from '../../platform/app-error.ts';
 import { deadlineRules, reminderMoments } from './deadlines.rules.ts';
 import {
   actionsOf,

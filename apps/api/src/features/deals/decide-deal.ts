@@ -6,6 +6,7 @@ import { inTransaction } from '../../platform/transaction.ts';
 import { createWords, massWords } from '../../platform/words.ts';
 import type { World } from '../../platform/world.ts';
 import { recordCountersign } from '../deliveries/deliveries.commands.ts';
+import { netOf } from '../deliveries/deliveries.reads.ts';
 import { notify } from '../notices/notices.commands.ts';
 import { returnHold } from '../payments/payments.commands.ts';
 import { settleDeal } from '../settlements/settlements.commands.ts';
@@ -118,9 +119,11 @@ export const acceptClaim = (world: Pick<World, 'db'>, step: OwnStep): Promise<De
       due: null,
       detail: { adjustmentMinor: claim.adjustmentMinor },
     });
+    const { money } = createWords(await marketTerms(tx));
+    const shortG = netOf({ grossG: claim.declaredG, tareG: claim.foundG });
     await settleDeal(tx, deal, {
       adjustmentMinor: claim.adjustmentMinor,
-      reason: `Mass short: ${massWords(claim.foundG)} found of ${massWords(claim.declaredG)} declared`,
+      reason: `Mass: ${money(deal.priceMinor)} × ${massWords(shortG)} short ÷ ${massWords(claim.declaredG)} declared`,
       now,
     });
   });

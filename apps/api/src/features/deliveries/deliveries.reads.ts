@@ -2,6 +2,8 @@ import type { EntityManager } from 'typeorm';
 import { massAdjustment, netOf, toleranceOf } from './weigh-in.rules.ts';
 import { WeighIn } from './weigh-in.entity.ts';
 
+export { netOf };
+
 export interface WeighInFacts extends WeighIn {
   declaredG: number;
   /** Found less declared: negative for a shortage. */

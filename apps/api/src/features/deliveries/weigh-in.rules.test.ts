@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { AppError } from '../../platform/app-error.ts';
+import type { AppError } from '../../platform/app-error.ts';
 import { assertPlausible, massAdjustment, netOf, toleranceOf } from './weigh-in.rules.ts';
 
 const refusal = (grossG: number, tareG: number, declaredG: number): AppError => {

@@ -28,7 +28,7 @@ export async function statementPdf(
         ['Seller', `${seller.name}, ${seller.place}`],
         ['Buyer', `${buyer.name}, ${buyer.place}`],
         ['Sale basis', 'Outright: the lot as it stands'],
-        ['Settled', words.moment(new Date(settlement.settledAt))],
+        ['Settled', words.date(new Date(settlement.settledAt))],
       ]);
       drawMasses(sheet, view);
       drawSteps(sheet, settlement, words);
@@ -40,7 +40,7 @@ export async function statementPdf(
           { title: 'What', width: '*' },
         ],
         view.chain.map(({ title, at, note }) => ({
-          cells: [title, at ? words.moment(new Date(at)) : 'to come', note],
+          cells: [title, at ? words.date(new Date(at)) : 'to come', note],
         })),
       );
       sheet.text('Gold only: other metals go to the buyer and are in the price.', { small: true });

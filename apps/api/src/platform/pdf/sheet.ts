@@ -12,6 +12,8 @@ const quiet = '#5c574f';
 const rule = '#c9c3b8';
 const margin = 56;
 const footerGap = 28;
+const roomForPart = 110;
+const cornerWidth = 110;
 
 export interface Column {
   title: string;
@@ -33,10 +35,22 @@ interface PdfOptions {
   footer: string;
 }
 
+const small = { src: regular, size: 8.5 };
+
+const toCells = ({ cells, total = false }: TableRow) =>
+  cells.map((text) => ({
+    text,
+    type: 'TD',
+    font: { src: total ? semiBold : regular, size: 10 },
+    ...(total ? { borderColor: { top: ink, bottom: rule } } : {}),
+  }));
+
 /** A paper of the market while it is drawn: every part is tagged for screen readers, in reading order. */
 export class Sheet {
   readonly #doc: PDFKit.PDFDocument;
   readonly #root: PDFKit.PDFStructureElement;
+  /** Text above this height leaves room for what stands in the upper right corner. */
+  #besideUntil = 0;
 
   constructor(doc: PDFKit.PDFDocument) {
     this.#doc = doc;
@@ -49,8 +63,11 @@ export class Sheet {
     this.#doc.moveDown(0.3);
   }
 
+  /** Begins a part; on a new page when too little room is left for it to make sense. */
   subheading(text: string): void {
-    this.#doc.moveDown(0.9);
+    const { height } = this.#doc.page;
+    if (this.#doc.y > height - margin - footerGap - roomForPart) this.#doc.addPage();
+    else this.#doc.moveDown(0.9);
     this.#write('H2', text, { font: semiBold, size: 12 });
     this.#doc.moveDown(0.3);
   }
@@ -64,6 +81,7 @@ export class Sheet {
   qrCode(content: string, alt: string): void {
     const doc = this.#doc;
     const size = 88;
+    this.#besideUntil = margin + size;
     const figure = doc.struct('Figure', { alt }, () =>
       drawQrCode(doc, { content, x: doc.page.width - margin - size, y: margin, size }),
     );
@@ -72,49 +90,38 @@ export class Sheet {
   }
 
   table(columns: Column[], rows: TableRow[]): void {
-    const align = (index: number) => ({ x: columns[index]!.right ? ('right' as const) : ('left' as const) });
-    const head = columns.map(({ title }, index) => ({
-      text: title,
-      type: 'TH' as const,
-      align: align(index),
-      textColor: quiet,
-      font: { src: regular, size: 8.5 },
-    }));
-    const body = rows.map(({ cells, total = false }) =>
-      cells.map((text, index) => ({
-        text,
-        type: 'TD' as const,
-        align: align(index),
-        font: { src: total ? semiBold : regular, size: 10 },
-        borderColor: total ? { top: ink, bottom: rule } : rule,
-      })),
+    const head = columns.map(({ title }) => ({ text: title, type: 'TH', textColor: quiet, font: small }));
+    this.#draw(columns, [head, ...rows.map(toCells)]);
+  }
+
+  /** Names with their values, one a row. */
+  facts(pairs: [name: string, value: string][]): void {
+    const columns: Pick<Column, 'width'>[] = [{ width: 150 }, { width: '*' }];
+    this.#draw(
+      columns,
+      pairs.map(([name, value]) => [
+        { text: name, type: 'TH', textColor: quiet, font: { src: regular, size: 10 } },
+        { text: value, type: 'TD', font: { src: regular, size: 10 } },
+      ]),
     );
+  }
+
+  #draw(columns: Omit<Column, 'title'>[], cells: object[][]): void {
     const options = {
       // Tagged: the row and cell elements are hung below this one.
       structParent: this.#root,
-      columnStyles: columns.map(({ width }) => ({ width })),
+      columnStyles: columns.map(({ width, right = false }) => ({ width, align: { x: right ? 'right' : 'left' } })),
       defaultStyle: {
-        border: { top: 0.5, bottom: 0.5 },
+        border: { top: 0.5, bottom: 0.5, left: 0, right: 0 },
         borderColor: rule,
-        padding: { top: 4, bottom: 4, left: 2, right: 6 },
+        padding: { top: 4, bottom: 4, left: 0, right: 8 },
       },
-      data: [head, ...body],
+      data: cells,
     };
     this.#doc.font(regular).fontSize(10).fillColor(ink);
     this.#doc.table(options as unknown as PDFKit.Mixins.TableOptionsWithData);
     this.#doc.x = margin;
     this.#doc.moveDown(0.4);
-  }
-
-  /** Names with their values, one a row. */
-  facts(pairs: [name: string, value: string][]): void {
-    this.table(
-      [
-        { title: 'What', width: 150 },
-        { title: 'Value', width: '*' },
-      ],
-      pairs.map((cells) => ({ cells })),
-    );
   }
 
   end(): void {
@@ -126,7 +133,8 @@ export class Sheet {
     text: string,
     { font, size, colour = ink }: { font: string; size: number; colour?: string },
   ): void {
-    const width = this.#doc.page.width - 2 * margin;
+    const beside = this.#doc.y < this.#besideUntil ? cornerWidth : 0;
+    const width = this.#doc.page.width - 2 * margin - beside;
     this.#doc
       .font(font)
       .fontSize(size)
