@@ -1,7 +1,6 @@
 import type { On } from '../../platform/routes.ts';
-import type { World } from '../../platform/world.ts';
-import { checkLedger } from './ledger-check.ts';
+import type { LedgerService } from './ledger.service.ts';
 
-export function ledgerRoutes(on: On, world: World): void {
-  on('GET /desk/ledger', () => checkLedger(world));
+export function ledgerRoutes(on: On, ledger: LedgerService): void {
+  on('GET /desk/ledger', () => ledger.check());
 }

@@ -81,6 +81,28 @@ test('lost before the settlement it comes out of the hold, and the deal stays fr
   await expectCleanBooks();
 });
 
+test('what is on its way to the seller stops while the deal is frozen, and goes out when the dispute is won', async () => {
+  const deal = await addDeal(stage.market);
+  await setUpPayouts(stage, deal);
+  await payOnPage(stage, deal);
+  await settle(deal);
+  const id = await dispute(deal);
+  const transfer = async () => {
+    const rows: { state: string; reason: string }[] = await stage.market.db.query(
+      'select state, reason from transfers where deal_id = $1',
+      [deal.id],
+    );
+    return rows[0];
+  };
+  await deliverAll(stage);
+  expect(await transfer()).toEqual({ state: 'waiting', reason: 'The deal is frozen.' });
+  await stage.processor.control(`/disputes/${id}/close`, { result: 'won' });
+  await deliverAll(stage);
+  expect(await transfer()).toEqual({ state: 'sent', reason: '' });
+  await deliverAll(stage);
+  await expectCleanBooks();
+});
+
 test('lost after the settlement it is the market’s expense', async () => {
   const deal = await addDeal(stage.market);
   await setUpPayouts(stage, deal);

@@ -11,7 +11,7 @@ import { refreshPayment } from './record-payment.ts';
 
 type Parts = Pick<World, 'db' | 'payments' | 'settings' | 'log'>;
 
-interface Press {
+export interface Press {
   dealCode: string;
   buyerId: string;
 }

@@ -4,8 +4,7 @@ import { payOnPage, retryNow, settle, setUpPayouts } from '../../../test/payment
 import { deliverAll, openMarketWithProcessor } from '../../../test/processor.ts';
 import { checkLedger } from '../ledger/ledger-check.ts';
 import { accountCode, balanceOf } from '../ledger/ledger.reads.ts';
-import { returnHold } from './payments.commands.ts';
-import { releaseWaitingTransfers } from './payments.commands.ts';
+import { releaseWaitingTransfers, returnHold } from './payments.commands.ts';
 
 let stage: Awaited<ReturnType<typeof openMarketWithProcessor>>;
 beforeAll(async () => {
@@ -126,6 +125,7 @@ test('four workers at once send one transfer', async () => {
   await retryNow(stage.market);
   await expectCleanBooks();
   expect(await sentFor(deal)).toEqual([sellerGetsMinor]);
+  expect(await transferOf(deal)).toMatchObject({ state: 'sent' });
 });
 
 test('the processor down: the transfer waits its turn, nothing is posted, and it goes out afterwards', async () => {
@@ -171,6 +171,20 @@ test('the seller’s share waits for the account and for the papers, with the re
   await market.work();
   expect(await transferOf(deal)).toMatchObject({ state: 'sent', reason: '' });
   expect(await sentFor(deal)).toEqual([sellerGetsMinor]);
+  await expectCleanBooks();
+});
+
+test('what the processor refuses for good is set aside for the desk', async () => {
+  const { market } = stage;
+  const deal = await settledDeal();
+  await market.db.query(`update payments set charge_id = 'ch_unknown' where deal_id = $1`, [deal.id]);
+  await market.work();
+  expect(await transferOf(deal)).toMatchObject({
+    state: 'failed',
+    reason: 'The payment processor refused the transfer. The desk looks into it.',
+  });
+  expect(await owedTo(deal)).toBe(sellerGetsMinor);
+  expect(await sentFor(deal)).toEqual([]);
   await expectCleanBooks();
 });
 

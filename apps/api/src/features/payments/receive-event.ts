@@ -1,12 +1,18 @@
-import type { World } from '../../platform/world.ts';
 import { AppError } from '../../platform/app-error.ts';
 import { addToInbox } from '../../platform/inbox.ts';
+import type { World } from '../../platform/world.ts';
 import { isHeeded } from './event-effects.ts';
+
+export interface SignedEvent {
+  /** The untouched bytes, over which the signature goes. */
+  raw: unknown;
+  signature: string;
+}
 
 /** Keeps a signed event for the worker. @throws AppError request.invalid when nobody we know has signed it; nothing is kept then */
 export async function receiveEvent(
   { db, payments }: Pick<World, 'db' | 'payments'>,
-  { raw, signature }: { raw: unknown; signature: string },
+  { raw, signature }: SignedEvent,
 ): Promise<void> {
   if (!Buffer.isBuffer(raw)) throw new AppError('request.invalid', 'The event is empty.');
   const event = payments.verifyEvent(raw, signature);

@@ -1,5 +1,4 @@
-import type { OutboxHandler } from '../../platform/outbox.ts';
-import { HopelessEffect } from '../../platform/outbox.ts';
+import { HopelessEffect, type OutboxHandler } from '../../platform/outbox.ts';
 import { ProcessorFailure, ProcessorRefusal, type ProcessorRefund, type RefundOrder } from '../../platform/payments.ts';
 import { inTransaction } from '../../platform/transaction.ts';
 import type { World } from '../../platform/world.ts';
@@ -36,7 +35,7 @@ async function create({ db, payments, log }: Parts, id: string, order: RefundOrd
     if (!(error instanceof ProcessorRefusal)) throw error;
     log.error({ err: error, refundId: id }, 'the processor refused a refund');
     const reason = 'The payment processor refused the refund. The desk looks into it.';
-    await db.manager.update(Refund, { id }, { state: 'failed', reason });
+    await db.manager.update(Refund, { id, state: 'queued' }, { state: 'failed', reason });
     throw new HopelessEffect(`${error.code}: ${error.message}`);
   }
 }

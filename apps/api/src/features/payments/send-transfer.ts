@@ -72,12 +72,12 @@ async function refuse(
 ): Promise<null> {
   const account = await payments.retrieveAccount(order.accountId);
   if (!account.transfersActive) {
-    await db.manager.update(Transfer, { id }, { state: 'waiting', reason: '' });
+    await db.manager.update(Transfer, { id, state: 'queued' }, { state: 'waiting', reason: '' });
     await inTransaction(db, (tx) => recordAccount(tx, account));
     return null;
   }
   log.error({ err: error, transferId: id }, 'the processor refused a transfer');
   const reason = 'The payment processor refused the transfer. The desk looks into it.';
-  await db.manager.update(Transfer, { id }, { state: 'failed', reason });
+  await db.manager.update(Transfer, { id, state: 'queued' }, { state: 'failed', reason });
   throw new HopelessEffect(`${error.code}: ${error.message}`);
 }
