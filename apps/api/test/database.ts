@@ -5,7 +5,11 @@ import { inject } from 'vitest';
 async function asAdmin(sql: string): Promise<void> {
   const client = new pg.Client({ connectionString: inject('database').adminUrl });
   await client.connect();
-  await client.query(sql).finally(() => client.end());
+  try {
+    await client.query(sql);
+  } finally {
+    await client.end();
+  }
 }
 
 const withName = (url: string, name: string): string =>

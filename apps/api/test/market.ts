@@ -167,7 +167,7 @@ function createCaller(origin: string, memberId: string | null): Caller {
         encodeURIComponent(String((params as Record<string, unknown>)[name])),
       );
       const search = query
-        ? `?${new URLSearchParams(Object.entries(query as object).map(([key, value]): [string, string] => [key, String(value)]))}`
+        ? `?${new URLSearchParams(Object.entries(query as object).map(([key, value]): [string, string] => [key, String(value)])).toString()}`
         : '';
       const response = await send(`/api${path}${search}`, {
         method,

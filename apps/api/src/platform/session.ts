@@ -5,7 +5,6 @@ import jwt from 'jsonwebtoken';
 import type { DataSource, EntityManager } from 'typeorm';
 import { z } from 'zod';
 import type { Settings } from '../settings.ts';
-import type { Actor } from './actor.ts';
 import { AppError } from './app-error.ts';
 import type { SessionGate } from './routes.ts';
 import { inTransaction } from './transaction.ts';

@@ -18,8 +18,13 @@ export function kindOfBytes(head: Buffer): PhotoKind | 'heic' | null {
 /** The kind of a file that was sent as a photo. @throws AppError photo.kind_refused for anything but JPEG, PNG and WebP */
 export async function photoKind(path: string): Promise<PhotoKind> {
   const file = await open(path);
-  const { buffer } = await file.read(Buffer.alloc(16), 0, 16, 0).finally(() => file.close());
-  const kind = kindOfBytes(buffer);
+  const start = Buffer.alloc(16);
+  try {
+    await file.read(start, 0, 16, 0);
+  } finally {
+    await file.close();
+  }
+  const kind = kindOfBytes(start);
   if (kind === 'heic')
     throw new AppError(
       'photo.kind_refused',
