@@ -6,6 +6,10 @@ mountApp({
   app: 'seller',
   roleWord: 'Seller',
   basename: '/sell',
-  nav: [{ to: '/', label: 'My lots', end: true }],
+  nav: [
+    { to: '/', label: 'My lots', end: true },
+    { to: '/deals', label: 'Deals' },
+    { to: '/payouts', label: 'Payouts' },
+  ],
   routes,
 });

@@ -1,0 +1,21 @@
+import { call, withFreshPassword } from '@lydite/client';
+import { queryOptions, useMutation } from '@tanstack/react-query';
+
+export const payoutAccountQuery = queryOptions({
+  queryKey: ['payouts', 'account'],
+  queryFn: () => call('GET /my/payout-account'),
+  refetchInterval: 15_000,
+});
+
+/** Sold lots with what they brought: the statements stand with them. */
+export const soldQuery = queryOptions({
+  queryKey: ['deals', 'own', 'seller'],
+  queryFn: () => call('GET /my/deals', { query: { side: 'seller' } }),
+});
+
+/** Asks for the processor's own page, which opens once and for minutes, and goes there. */
+export const useSetUpPayouts = () =>
+  useMutation({
+    mutationFn: () => withFreshPassword(() => call('POST /my/payout-account/link')),
+    onSuccess: ({ url }) => location.assign(url),
+  });
