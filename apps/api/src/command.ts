@@ -1,4 +1,6 @@
 import { ledgerCheck } from './commands/ledger-check.ts';
+import { operatorsFirst } from './commands/operators-first.ts';
+import { seed } from './commands/seed.ts';
 import { createOwnerSource } from './data-source.ts';
 import { ensureReferenceData } from './seeds/reference-data.ts';
 
@@ -14,7 +16,12 @@ async function migrate(): Promise<void> {
   console.log(done.length === 0 ? 'The schema is up to date.' : done.map((one) => `Ran ${one.name}.`).join('\n'));
 }
 
-const commands: Record<string, (args: string[]) => Promise<void>> = { migrate, 'ledger-check': ledgerCheck };
+const commands: Record<string, (args: string[]) => Promise<void>> = {
+  migrate,
+  seed,
+  'ledger-check': ledgerCheck,
+  'operators-first': operatorsFirst,
+};
 
 const [name = '', ...args] = process.argv.slice(2);
 const command = commands[name];
