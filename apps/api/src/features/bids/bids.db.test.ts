@@ -59,6 +59,39 @@ describe('placing', () => {
     expect((await lotRow(lot.id)).seq).toBe(1);
   });
 
+  test('an attempt belongs to its lot, with bids and with asking prices', async () => {
+    const [one, two] = [await addOpenLot(market, { sellerId }), await addOpenLot(market, { sellerId })];
+    const asking = await addOpenLot(market, { sellerId, askingMinor: 90_000 });
+    const attempt = randomUUID();
+    expect((await bid(anna, one.code, 60_000, attempt)).status).toBe(201);
+    expect((await bid(anna, two.code, 60_000, attempt)).problem).toMatchObject({
+      code: 'request.invalid',
+      fields: [{ path: 'attempt' }],
+    });
+    const taken = await anna.call('POST /lots/:lotCode/take', {
+      params: { lotCode: asking.code },
+      body: { priceMinor: 90_000, attempt },
+    });
+    expect(taken.problem.code).toBe('request.invalid');
+    expect((await lotRow(two.id)).seq).toBe(0);
+  });
+
+  test('an amount that no payment could carry with freight and fee is refused', async () => {
+    const rich = await market.as(await addMember(market, { limitMinor: 99_999_999 }));
+    const lot = await addOpenLot(market, { sellerId });
+    expect((await bid(rich, lot.code, 99_000_000)).problem).toMatchObject({
+      code: 'bid.over_limit',
+      context: { mostMinor: 99_999_999 },
+    });
+    const heavy = await addOpenLot(market, { sellerId, askingMinor: 90_000 });
+    await market.db.query('update lots set freight_minor = 99999999 where id = $1', [heavy.id]);
+    const taken = await rich.call('POST /lots/:lotCode/take', {
+      params: { lotCode: heavy.code },
+      body: { priceMinor: 90_000, attempt: randomUUID() },
+    });
+    expect(taken.problem.code).toBe('bid.over_limit');
+  });
+
   test('refusals name their reason and write nothing', async () => {
     const lot = await addOpenLot(market, { sellerId });
     const closed = await addOpenLot(market, { sellerId, closesIn: '-1 second' });
@@ -169,6 +202,20 @@ describe('closing', () => {
   });
 });
 
+test('a lot that cannot be closed keeps no other from closing', async () => {
+  const stuck = await addOpenLot(market, { sellerId, closesIn: '10 minutes' });
+  const fine = await addOpenLot(market, { sellerId, closesIn: '11 minutes' });
+  await bid(anna, stuck.code, 60_000);
+  await bid(berta, fine.code, 60_000);
+  await market.db.query('update lots set freight_minor = 99999999 where id = $1', [stuck.id]);
+  await market.advance('12 minutes');
+  await sweepLots(market.world);
+  expect((await lotRow(fine.id)).state).toBe('awarded');
+  await market.db.query('update lots set freight_minor = 0 where id = $1', [stuck.id]);
+  await sweepLots(market.world);
+  expect((await lotRow(stuck.id)).state).toBe('awarded');
+});
+
 describe('asking price', () => {
   const take = (caller: Caller, lotCode: string, priceMinor: number, attempt = randomUUID()) =>
     caller.call('POST /lots/:lotCode/take', { params: { lotCode }, body: { priceMinor, attempt } });
@@ -222,12 +269,19 @@ describe('a winner who does not pay', () => {
       { state: 'cancelled' },
       { buyer_id: berta.memberId, price_minor: '45500', state: 'awaiting_payment' },
     ]);
+    expect((await answer(berta, lot.code, true)).body).toEqual(taken.body);
+    expect((await berta.call('GET /my/bids')).body.rows[0]).toMatchObject({ standing: 'highest', priceMinor: 45_500 });
+    expect((await anna.call('GET /my/bids')).body.rows[0]).toMatchObject({ standing: 'outbid' });
   });
 
   test('refused or left for a day, the lot is unsold', async () => {
     const refused = await unpaid();
     expect((await answer(berta, refused.code, false)).body.dealCode).toBeNull();
     expect((await lotRow(refused.id)).state).toBe('unsold');
+    await market.work();
+    expect(market.mails.find(({ subject }) => subject.startsWith(`${refused.code} closed`))?.text).toContain(
+      'The next bidder did not take it either.',
+    );
     const left = await unpaid();
     await market.advance('25 hours');
     await sweepLots(market.world);

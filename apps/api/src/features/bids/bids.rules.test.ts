@@ -141,3 +141,9 @@ describe('late-bid extension', () => {
     expect(late).toEqual(latestClosesAt);
   });
 });
+
+test('the least next bid never passes the largest amount', () => {
+  const top = { ...fresh(100), priceMinor: 99_500_000, leaderId: 'a', leaderCeilingMinor: 99_999_999 };
+  expect(leastNextMinor(top, 'a')).toBe(99_999_999);
+  expect(leastNextMinor(top, 'b')).toBe(99_999_999);
+});

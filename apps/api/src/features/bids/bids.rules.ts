@@ -4,6 +4,8 @@ const minuteMs = 60_000;
 export const lateBidMs = 5 * minuteMs;
 export const underOfferHours = 24;
 export const bidsPerMinute = 60;
+/** No amount of the market is larger (docs/rules.md). */
+export const mostMinor = 99_999_999;
 
 /** Smallest of 1, 2, 5 × 10ⁿ that is at least 0.8 % of `amountMinor`, and at least one minor unit. */
 export function stepMinor(amountMinor: number): number {
@@ -26,11 +28,11 @@ export interface CeilingBid {
   ceilingMinor: number;
 }
 
-/** Least ceiling a bidder may name now: for the leader one minor unit over the own ceiling, for others one step over the price. */
+/** Least ceiling a bidder may name now: for the leader one minor unit over the own ceiling, for others one step over the price; never over the largest amount. */
 export function leastNextMinor(auction: Auction, bidderId: string | null): number {
   if (auction.priceMinor === null) return auction.startMinor;
-  if (bidderId !== null && bidderId === auction.leaderId) return auction.leaderCeilingMinor! + 1;
-  return auction.priceMinor + stepMinor(auction.priceMinor);
+  if (bidderId !== null && bidderId === auction.leaderId) return Math.min(mostMinor, auction.leaderCeilingMinor! + 1);
+  return Math.min(mostMinor, auction.priceMinor + stepMinor(auction.priceMinor));
 }
 
 /**

@@ -32,32 +32,36 @@ export const closeLot = ({ db }: Pick<World, 'db'>, lotId: string): Promise<void
         priceMinor: lot.priceMinor!,
         freightMinor: lot.freightMinor,
       });
-    else await tellUnsold(tx, lot);
+    else await tellUnsold(tx, lot, lot.bidders > 0 ? 'No bid reached your lowest price.' : 'Nobody bid.');
   });
 
-const tellUnsold = (tx: EntityManager, lot: LockedLot): Promise<void> =>
+const tellUnsold = (tx: EntityManager, lot: LockedLot, why: string): Promise<void> =>
   notify(tx, {
     memberId: lot.sellerId,
     kind: 'unsold',
     key: `unsold:${lot.id}`,
     subject: `${lot.code} closed without a sale`,
-    text:
-      lot.bidders > 0
-        ? 'No bid reached your lowest price. You can copy the lot and list it anew.'
-        : 'Nobody bid. You can copy the lot and list it anew.',
+    text: `${why} You can copy the lot and list it anew.`,
     link: `/sell/lots/${lot.code}`,
   });
 
 /** Closes what an alarm was lost for: open lots ten seconds past their close, and under-bidders' offers past their time. */
-export async function sweepLots(world: Pick<World, 'db'>): Promise<void> {
+export async function sweepLots(world: Pick<World, 'db' | 'log'>): Promise<void> {
   const late: { id: string }[] = await world.db.query(
     `select id from lots where state = 'open' and closes_at < market_now() - interval '10 seconds' order by closes_at limit 500`,
   );
-  for (const { id } of late) await closeLot(world, id);
+  // One lot that can't be closed must not keep the others waiting; it is tried again in a minute.
+  for (const { id } of late)
+    await closeLot(world, id).catch((error: unknown) =>
+      world.log.error({ err: error, lotId: id }, 'a lot could not be closed'),
+    );
   const offers: { id: string }[] = await world.db.query(
     'select id from under_offers where answered_at is null and answer_by < market_now() limit 500',
   );
-  for (const { id } of offers) await lapseUnderOffer(world, id);
+  for (const { id } of offers)
+    await lapseUnderOffer(world, id).catch((error: unknown) =>
+      world.log.error({ err: error, offerId: id }, 'an under-bidder’s offer could not be ended'),
+    );
 }
 
 /** The under-bidder did not answer in time: the lot is unsold. */
@@ -70,20 +74,21 @@ export const lapseUnderOffer = ({ db }: Pick<World, 'db'>, offerId: string): Pro
       'update under_offers set answered_at = $2, accepted = false where id = $1 and answered_at is null and answer_by <= $2 returning id',
       [offerId, now],
     );
-    if (rows.length > 0) await endUnsold(tx, lot);
+    if (rows.length > 0) await endUnsold(tx, lot, 'The next bidder did not answer.');
   });
 
-export async function endUnsold(tx: EntityManager, lot: LockedLot): Promise<void> {
+export async function endUnsold(tx: EntityManager, lot: LockedLot, why: string): Promise<void> {
   await tx.query(`update lots set state = 'unsold' where id = $1`, [lot.id]);
-  await tellUnsold(tx, lot);
+  await tellUnsold(tx, lot, why);
 }
 
 /** Offers the lot to the next bidder, at the price the auction gives without those who did not pay; unsold below the reserve. */
 export async function offerToUnderBidder(tx: EntityManager, lotId: string): Promise<void> {
   const { lot, now } = await lockLot(tx, { id: lotId });
-  if (lot.form !== 'open-bids') return endUnsold(tx, lot);
+  if (lot.form !== 'open-bids') return endUnsold(tx, lot, 'The buyer did not pay.');
   const again = replay(lot, await lastBidsOfSolvent(tx, lotId));
-  if (again.leaderId === null || !reserveReached(again)) return endUnsold(tx, lot);
+  if (again.leaderId === null || !reserveReached(again))
+    return endUnsold(tx, lot, 'The buyer did not pay, and no other bid reaches your lowest price.');
   const offer = {
     id: randomUUID(),
     lotId,

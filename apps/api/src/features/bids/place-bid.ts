@@ -9,7 +9,7 @@ import { notify } from '../notices/notices.commands.ts';
 import { Bid } from './bid.entity.ts';
 import { applyBid, bidsPerMinute, closeAfterBid, leastNextMinor, type Auction } from './bids.rules.ts';
 import { lockLot, type LockedLot } from './lock-lot.ts';
-import { assertRoom } from './room.ts';
+import { assertPayable, assertRoom } from './room.ts';
 
 export interface BidOrder {
   lotCode: string;
@@ -35,16 +35,31 @@ export function assertTakesBids(lot: LockedLot, bidderId: string, now: Date, for
     throw new AppError('lot.closed', 'This lot is closed. Your bid was not placed.');
 }
 
+/** What this attempt has placed already; null for a new one. @throws AppError request.invalid when it was another lot's */
+export async function earlierBid(
+  tx: EntityManager,
+  lot: LockedLot,
+  { bidderId, attempt }: Pick<BidOrder, 'bidderId' | 'attempt'>,
+): Promise<Bid | null> {
+  const earlier = await tx.findOneBy(Bid, { bidderId, attempt });
+  if (earlier && earlier.lotId !== lot.id)
+    throw new AppError('request.invalid', 'This attempt was a bid on another lot. Choose a new one for each bid.', {
+      fields: [{ path: 'attempt', message: 'Choose a new one for each bid.' }],
+    });
+  return earlier;
+}
+
 /** Places a binding bid with a ceiling, in one transaction on the locked lot; writes nothing when the rules refuse it. */
 export const placeBid = (world: Pick<World, 'db' | 'settings'>, order: BidOrder): Promise<BidOutcome> =>
   inTransaction(world.db, async (tx) => {
     const { lot, now } = await lockLot(tx, { code: order.lotCode });
-    const earlier = await tx.findOneBy(Bid, { bidderId: order.bidderId, attempt: order.attempt });
+    const earlier = await earlierBid(tx, lot, order);
     if (earlier) return outcomeOf(lot, order.bidderId, earlier.ceilingMinor);
     assertTakesBids(lot, order.bidderId, now, 'open-bids');
     await assertNotTooMany(tx, world, order.bidderId);
     assertHighEnough(lot, order);
     await assertRoom(tx, { memberId: order.bidderId, amountMinor: order.ceilingMinor, lotId: lot.id });
+    await assertPayable(tx, lot, { buyerId: order.bidderId, priceMinor: order.ceilingMinor });
 
     const after = applyBid(lot, order);
     const changed = after.priceMinor !== lot.priceMinor || after.leaderId !== lot.leaderId;

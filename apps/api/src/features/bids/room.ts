@@ -1,6 +1,8 @@
 import type { EntityManager } from 'typeorm';
 import { AppError } from '../../platform/app-error.ts';
-import { lockBuyer } from './lock-lot.ts';
+import { awardedHold } from '../deals/deals.reads.ts';
+import { mostMinor } from './bids.rules.ts';
+import { lockBuyer, type LockedLot } from './lock-lot.ts';
 
 /**
  * What a buyer's limit still has room for: limit − ceilings of open lots led − unpaid awards (docs/rules.md, Members).
@@ -35,5 +37,22 @@ export async function assertRoom(
       {
         context: { limitMinor, roomMinor },
       },
+    );
+}
+
+/**
+ * An award whose hold no payment can carry could never be opened, nor its lot be closed.
+ * @throws AppError bid.over_limit when price, freight and fee together are over the largest amount
+ */
+export async function assertPayable(
+  tx: EntityManager,
+  { sellerId, freightMinor }: Pick<LockedLot, 'sellerId' | 'freightMinor'>,
+  { buyerId, priceMinor }: { buyerId: string; priceMinor: number },
+): Promise<void> {
+  if ((await awardedHold(tx, { sellerId, buyerId, priceMinor, freightMinor })) > mostMinor)
+    throw new AppError(
+      'bid.over_limit',
+      'With freight and fee this is more than one payment can be. Bid less, or ask the seller about the freight.',
+      { context: { mostMinor } },
     );
 }

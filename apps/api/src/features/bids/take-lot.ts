@@ -6,8 +6,8 @@ import type { World } from '../../platform/world.ts';
 import { openDeal } from '../deals/deals.commands.ts';
 import { Bid } from './bid.entity.ts';
 import { lockLot } from './lock-lot.ts';
-import { assertTakesBids } from './place-bid.ts';
-import { assertRoom } from './room.ts';
+import { assertTakesBids, earlierBid } from './place-bid.ts';
+import { assertPayable, assertRoom } from './room.ts';
 
 export interface TakeOrder {
   lotCode: string;
@@ -24,7 +24,7 @@ export const takeLot = (
 ): Promise<{ dealCode: string }> =>
   inTransaction(db, async (tx) => {
     const { lot, now } = await lockLot(tx, { code: lotCode });
-    if (await tx.existsBy(Bid, { bidderId: buyerId, attempt }))
+    if (await earlierBid(tx, lot, { bidderId: buyerId, attempt }))
       return { dealCode: await dealCodeOf(tx, lot.id, buyerId) };
     assertTakesBids(lot, buyerId, now, 'asking-price');
     if (lot.askingMinor !== priceMinor)
@@ -32,6 +32,7 @@ export const takeLot = (
         context: { priceMinor: lot.askingMinor },
       });
     await assertRoom(tx, { memberId: buyerId, amountMinor: priceMinor, lotId: lot.id });
+    await assertPayable(tx, lot, { buyerId, priceMinor });
     await tx.query(
       `update lots set state = 'awarded', price_minor = $2, leader_id = $3, leader_ceiling_minor = $2, seq = seq + 1, bidders = 1, closed_at = $4 where id = $1`,
       [lot.id, priceMinor, buyerId, now],
@@ -58,7 +59,8 @@ export const takeLot = (
     return { dealCode: deal.code };
   });
 
-async function dealCodeOf(tx: EntityManager, lotId: string, buyerId: string): Promise<string> {
+/** Code of the buyer's latest deal on a lot they were awarded. */
+export async function dealCodeOf(tx: EntityManager, lotId: string, buyerId: string): Promise<string> {
   const rows: { code: string }[] = await tx.query(
     'select code from deals where lot_id = $1 and buyer_id = $2 order by awarded_at desc limit 1',
     [lotId, buyerId],

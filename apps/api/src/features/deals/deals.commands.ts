@@ -7,40 +7,18 @@ import { lotHeadline } from '../lots/lots.reads.ts';
 import { notify } from '../notices/notices.commands.ts';
 import { returnHold } from '../payments/payments.commands.ts';
 import { holdOf } from '../settlements/settlements.reads.ts';
+import { ratesFor, type Award } from './award-rates.ts';
 import { addEvent, dueAfter, lockDeal, moveDeal, setAlarms, type LockedDeal } from './deal-steps.commands.ts';
 import { Deal } from './deal.entity.ts';
-
-interface Award {
-  lotId: string;
-  sellerId: string;
-  buyerId: string;
-  priceMinor: number;
-  freightMinor: number;
-}
-
-interface Rates {
-  buyerFeeBp: number;
-  sellerFeeBp: number;
-  buyerTaxBp: number;
-  sellerTaxBp: number;
-}
-
-/** The fees of the schedule in force today, and each side's tax on them. */
-async function ratesFor(tx: EntityManager, { sellerId, buyerId }: Award): Promise<Rates> {
-  const rows: Rates[] = await tx.query(
-    `select f.buyer_fee_bp as "buyerFeeBp", f.seller_fee_bp as "sellerFeeBp", b.tax_bp as "buyerTaxBp", s.tax_bp as "sellerTaxBp"
-       from fee_schedules f, members b, members s
-      where f.from_day <= market_now()::date and b.id = $1 and s.id = $2 order by f.from_day desc limit 1`,
-    [buyerId, sellerId],
-  );
-  return rows[0]!;
-}
 
 /**
  * Opens the deal of an award inside the transaction that makes it: rates and hold are frozen, the pay-by time runs, both
  * sides are told. The lot must be locked by the caller.
  */
-export async function openDeal(tx: EntityManager, award: Award): Promise<{ id: string; code: string }> {
+export async function openDeal(
+  tx: EntityManager,
+  award: Award & { lotId: string },
+): Promise<{ id: string; code: string }> {
   const now = await marketNow(tx);
   const rates = await ratesFor(tx, award);
   const due = await dueAfter(tx, { paidAt: null }, { kind: 'pay', from: now });

@@ -8,11 +8,16 @@ import { weighInOf } from '../deliveries/deliveries.reads.ts';
 import { lotHeadline } from '../lots/lots.reads.ts';
 import { paymentStanding } from '../payments/payments.reads.ts';
 import { photosOf } from '../photos/photos.reads.ts';
-import { settlementOf } from '../settlements/settlements.reads.ts';
+import { holdOf, settlementOf } from '../settlements/settlements.reads.ts';
+import { ratesFor, type Award } from './award-rates.ts';
 import { toDeskEvent } from './deal-events.presenter.ts';
 import { toDealView } from './deal-view.presenter.ts';
 import { Claim, Deal, DealEvent } from './deal.entity.ts';
 import type { Side } from './deals.rules.ts';
+
+/** What a buyer would pay into the hold if the lot were awarded to them now, at the rates in force. */
+export const awardedHold = async (tx: EntityManager, award: Award): Promise<number> =>
+  holdOf({ ...award, ...(await ratesFor(tx, award)) });
 
 export interface DealParties {
   id: string;
