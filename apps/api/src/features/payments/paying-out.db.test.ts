@@ -1,7 +1,10 @@
+import { setTimeout as sleep } from 'node:timers/promises';
 import { afterAll, afterEach, beforeAll, expect, test } from 'vitest';
 import { addDeal, type TestDeal } from '../../../test/deals.ts';
 import { payOnPage, retryNow, settle, setUpPayouts } from '../../../test/payments.ts';
 import { deliverAll, openMarketWithProcessor } from '../../../test/processor.ts';
+import { lockDeal } from '../deals/deal-steps.commands.ts';
+import { settleDeal } from '../settlements/settlements.commands.ts';
 import { checkLedger } from '../ledger/ledger-check.ts';
 import { accountCode, balanceOf } from '../ledger/ledger.reads.ts';
 import { releaseWaitingTransfers, returnHold } from './payments.commands.ts';
@@ -171,6 +174,30 @@ test('the seller’s share waits for the account and for the papers, with the re
   await market.work();
   expect(await transferOf(deal)).toMatchObject({ state: 'sent', reason: '' });
   expect(await sentFor(deal)).toEqual([sellerGetsMinor]);
+  await expectCleanBooks();
+});
+
+test('papers seen while a settlement is being written do not leave its transfer waiting', async () => {
+  const { market } = stage;
+  const deal = await addDeal(market);
+  await setUpPayouts(stage, deal);
+  await payOnPage(stage, deal);
+  await market.db.query('update members set verified_at = null where id = $1', [deal.sellerId]);
+  await market.db.query(`update deals set state = 'settling' where id = $1`, [deal.id]);
+  let seen: Promise<void> | undefined;
+  await market.db.transaction(async (tx) => {
+    const locked = await lockDeal(tx, { id: deal.id });
+    await settleDeal(tx, locked.deal, { adjustmentMinor: 0, reason: '', now: locked.now });
+    seen = market.db.transaction(async (other) => {
+      await other.query('update members set verified_at = market_now() where id = $1', [deal.sellerId]);
+      await releaseWaitingTransfers(other, deal.sellerId);
+    });
+    await sleep(300);
+  });
+  await seen;
+  expect(await transferOf(deal)).toMatchObject({ state: 'queued', reason: '' });
+  await market.work();
+  expect(await transferOf(deal)).toMatchObject({ state: 'sent' });
   await expectCleanBooks();
 });
 

@@ -15,7 +15,7 @@ export interface TransferOrderOfSettlement {
 }
 
 /**
- * Orders a seller's share of a settlement, which the caller has posted to their payable account. It waits, with the reason,
+ * Orders a seller's share of a settlement, which the caller posts to their payable account. It waits, with the reason,
  * until the seller may be paid. Twice is once per settlement and member; nought orders nothing.
  */
 export async function orderTransfer(tx: EntityManager, order: TransferOrderOfSettlement): Promise<void> {
@@ -61,7 +61,7 @@ export interface RefundOrderOfDeal {
 }
 
 /**
- * Orders part or all of a deal's payment back to the buyer; the caller has posted it to the deal's refund account.
+ * Orders part or all of a deal's payment back to the buyer; the caller posts it to the deal's refund account.
  * Nought orders nothing.
  * @throws Error when the deal has no payment, or not as much is left of it
  */

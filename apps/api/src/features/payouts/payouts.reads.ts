@@ -8,13 +8,16 @@ export interface PayoutReadiness {
   reason: string;
 }
 
-/** May this member be paid now: an account that takes transfers and pays out, and papers seen by the desk. */
+/**
+ * May this member be paid now: an account that takes transfers and pays out, and papers seen by the desk. Locks the member until the
+ * end of the transaction: a transfer that is made to wait and the news that ends its waiting come one after the other.
+ */
 export async function payoutReadiness(tx: EntityManager, memberId: string): Promise<PayoutReadiness> {
-  const account = await tx.findOneBy(PayoutAccount, { memberId });
   const rows: { verified: boolean }[] = await tx.query(
-    'select verified_at is not null as verified from members where id = $1',
+    'select verified_at is not null as verified from members where id = $1 for no key update',
     [memberId],
   );
+  const account = await tx.findOneBy(PayoutAccount, { memberId });
   const accountId = account?.accountId ?? null;
   if (!account) return { accountId, reason: 'Set up your payout account.' };
   if (!isReady(account))

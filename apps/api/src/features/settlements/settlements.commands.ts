@@ -70,7 +70,6 @@ async function payOut(tx: EntityManager, deal: LockedDeal, settlement: Settlemen
     { account: accountCode.tax, amountMinor: -(settlement.buyerTaxMinor + settlement.sellerTaxMinor) },
     { account: accountCode.refund(deal.code), amountMinor: -refundMinor },
   ];
-  await postTransfer(tx, { kind: 'settlement', dealId: deal.id, key: `settlement:${deal.id}`, eventAt: at, entries });
   await orderTransfer(tx, {
     settlementId: id,
     memberId: deal.sellerId,
@@ -78,6 +77,8 @@ async function payOut(tx: EntityManager, deal: LockedDeal, settlement: Settlemen
     amountMinor: sellerGetsMinor,
   });
   await orderRefund(tx, { dealId: deal.id, amountMinor: refundMinor, why: 'settlement' });
+  // Last, since it locks the accounts that every deal shares.
+  await postTransfer(tx, { kind: 'settlement', dealId: deal.id, key: `settlement:${deal.id}`, eventAt: at, entries });
 }
 
 async function tellSettled(tx: EntityManager, deal: LockedDeal, settlement: Settlement): Promise<void> {
