@@ -66,6 +66,12 @@ test('a dispute freezes the deal and puts the money in suspense; won, all goes o
   expect(await balance(accountCode.hold(deal.code))).toBe(93_600);
   const after: { at: Date }[] = await stage.market.db.query('select due_at as at from deals where id = $1', [deal.id]);
   expect(after[0]!.at.getTime() - before[0]!.at.getTime()).toBeGreaterThanOrEqual(2 * 3_600_000);
+  // The bank's news of one decision comes in several events: the timeline tells it once.
+  const told: { kind: string }[] = await stage.market.db.query(
+    `select kind from deal_events where deal_id = $1 and kind in ('freeze', 'release') order by id`,
+    [deal.id],
+  );
+  expect(told.map(({ kind }) => kind)).toEqual(['freeze', 'release']);
   await expectCleanBooks();
 });
 

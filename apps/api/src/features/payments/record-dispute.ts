@@ -18,12 +18,11 @@ export async function recordDispute(tx: EntityManager, dispute: ProcessorDispute
   const payment = await tx.findOneBy(Payment, { chargeId: dispute.chargeId });
   if (!payment) throw new Error(`The charge ${dispute.chargeId} is in dispute and not known yet`);
   const { dealId } = payment;
-  await freezeDeal(tx, { dealId });
+  // The deal is locked first, as everywhere; a dispute that is won already freezes nothing any more.
+  await (dispute.state === 'won' ? releaseDeal : freezeDeal)(tx, { dealId });
   await postMovements(tx, dealId, dispute);
   if (dispute.state === 'lost') await postLoss(tx, dealId, dispute);
-  if (dispute.state !== 'won') return;
-  await releaseDeal(tx, { dealId });
-  await releaseDealTransfers(tx, dealId);
+  if (dispute.state === 'won') await releaseDealTransfers(tx, dealId);
 }
 
 async function postMovements(
