@@ -24,6 +24,7 @@ describe('what is missing', () => {
     ['a line without a class', { classCode: null }, ['lines.0.classCode']],
     ['a class the catalogue in force has not', { classCode: 'gone' }, ['lines.0.classCode']],
     ['a line without a mass, even with pieces', { massG: null, pieces: 20 }, ['lines.0.massG']],
+    ['a mass below the milligram', { massG: 0.0004 }, ['lines.0.massG']],
     ['a range upside down', { plating: { kind: 'range', leastUm: 2, mostUm: 1 } }, ['lines.0.plating']],
   ])('%s', (_, line, paths) => expect(pathsOf(withLine(line))).toEqual(paths));
 
@@ -32,6 +33,11 @@ describe('what is missing', () => {
     expect(pathsOf(withSale({ form: 'asking-price', startMinor: null }))).toEqual(['sale.askingMinor']);
     expect(pathsOf(withSale({ startMinor: 5000, reserveMinor: 4999 }))).toEqual(['sale.reserveMinor']);
     expect(pathsOf(withSale({ startMinor: 5000, reserveMinor: 5000 }))).toEqual([]);
+    expect(pathsOf(withSale({ startMinor: 49 }))).toEqual(['sale.startMinor']);
+    expect(pathsOf(withSale({ startMinor: 50 }))).toEqual([]);
+    expect(pathsOf(withSale({ form: 'asking-price', startMinor: null, askingMinor: 49 }))).toEqual([
+      'sale.askingMinor',
+    ]);
   });
 
   test('freight when the seller sends (0 is an amount), hours when the buyer collects', () => {

@@ -78,18 +78,37 @@ function missingContents({ draft: { title, lines }, classCodes }: DraftFacts): M
   ];
 }
 
+/** The smallest mass the market keeps. */
+const leastMassG = 0.001;
+
 const missingMasses = ({ lines }: LotDraft): MissingItem[] => [
   ...when(lines.length === 0, 'weight', 'lines', 'Enter the net mass of each line.'),
-  ...lines.flatMap((line, index) =>
-    when(line.massG === null, 'weight', `lines.${index}.massG`, `Enter the net mass of ${lineName(line, index)}.`),
-  ),
+  ...lines.flatMap((line, index) => [
+    ...when(line.massG === null, 'weight', `lines.${index}.massG`, `Enter the net mass of ${lineName(line, index)}.`),
+    ...when(
+      line.massG !== null && line.massG < leastMassG,
+      'weight',
+      `lines.${index}.massG`,
+      `The net mass of ${lineName(line, index)} is less than a milligram. Check the unit.`,
+    ),
+  ]),
 ];
 
+/** The payment processor takes nothing smaller, and so the market sells nothing cheaper: 0.50. */
+const leastPriceMinor = 50;
+
 function missingSale({ sale: { form, startMinor, reserveMinor, askingMinor } }: LotDraft): MissingItem[] {
-  if (form === 'asking-price') return when(askingMinor === null, 'sale', 'sale.askingMinor', 'Set the asking price.');
+  const isTooLow = (minor: number | null): boolean => minor !== null && minor < leastPriceMinor;
+  const raise = 'Payments begin at 0.50: raise this price.';
+  if (form === 'asking-price')
+    return [
+      ...when(askingMinor === null, 'sale', 'sale.askingMinor', 'Set the asking price.'),
+      ...when(isTooLow(askingMinor), 'sale', 'sale.askingMinor', raise),
+    ];
   const isReserveLow = startMinor !== null && reserveMinor !== null && reserveMinor < startMinor;
   return [
     ...when(startMinor === null, 'sale', 'sale.startMinor', 'Set the price at which bidding starts.'),
+    ...when(isTooLow(startMinor), 'sale', 'sale.startMinor', raise),
     ...when(
       isReserveLow,
       'sale',

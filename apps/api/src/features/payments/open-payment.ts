@@ -81,7 +81,7 @@ const giveUp = (db: World['db'], paymentId: string): Promise<unknown> =>
   ]);
 
 async function createPage(world: Parts, payment: Payment, { dealCode, buyerId }: Press): Promise<string> {
-  const { db, payments, settings } = world;
+  const { db, payments, settings, log } = world;
   const deal = await dealToPay(db.manager, { code: dealCode, buyerId });
   const address = `${settings.PUBLIC_URL}/deals/${deal.code}`;
   const order: CheckoutOrder = {
@@ -100,7 +100,13 @@ async function createPage(world: Parts, payment: Payment, { dealCode, buyerId }:
   const { sessionId, url } = await payments.createCheckout(order).catch(async (error: unknown) => {
     // The processor repeats this answer for this key: the next press makes a new attempt.
     if (error instanceof ProcessorFailure || error instanceof ProcessorRefusal) await giveUp(db, payment.id);
-    throw error;
+    if (!(error instanceof ProcessorRefusal)) throw error;
+    log.error({ err: error, dealCode }, 'the processor refused a payment page');
+    throw new AppError(
+      'processor.unavailable',
+      'The payment processor does not take this payment. Nothing was charged; write to the market’s desk.',
+      { cause: error },
+    );
   });
   await db.query(`update payments set session_id = $2, url = $3, state = 'open' where id = $1 and state = 'created'`, [
     payment.id,

@@ -266,3 +266,10 @@ test('past the pay-by time no page opens', async () => {
   const late = await (await deal.buyer()).call('POST /deals/:dealCode/payment', { params: { dealCode: deal.code } });
   expect(late.problem).toMatchObject({ status: 409, detail: 'The time to pay is over.' });
 });
+
+test('a payment that the processor refuses is said in words, and charges nothing', async () => {
+  const deal = await addDeal(stage.market, { priceMinor: 10, freightMinor: 0 });
+  const refused = await (await deal.buyer()).call('POST /deals/:dealCode/payment', { params: { dealCode: deal.code } });
+  expect(refused.problem).toMatchObject({ code: 'processor.unavailable', status: 503 });
+  expect(refused.problem.detail).toContain('does not take this payment');
+});
