@@ -7,7 +7,7 @@ mountApp({
   roleWord: 'Seller',
   basename: '/sell',
   nav: [
-    { to: '/', label: 'My lots', end: true },
+    { to: '/lots', label: 'My lots' },
     { to: '/deals', label: 'Deals' },
     { to: '/payouts', label: 'Payouts' },
   ],

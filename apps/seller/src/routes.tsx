@@ -1,7 +1,7 @@
 import { dealRoutes, RequireRole } from '@lydite/client';
 import { Skeleton } from '@lydite/ui';
 import { Suspense } from 'react';
-import { Outlet, type RouteObject } from 'react-router-dom';
+import { Outlet, redirect, type RouteObject } from 'react-router-dom';
 
 /** Each page is a chunk of its own, and waits here for the market and for what it shows. */
 export const routes: RouteObject[] = [
@@ -15,7 +15,8 @@ export const routes: RouteObject[] = [
       {
         element: <RequireRole roles={['seller']} />,
         children: [
-          { path: '/', lazy: () => import('./pages/MyLotsPage.tsx') },
+          { path: '/', loader: () => redirect('/lots') },
+          { path: '/lots', lazy: () => import('./pages/MyLotsPage.tsx') },
           { path: '/lots/:lotCode', lazy: () => import('./pages/OwnLotPage.tsx') },
           { path: '/lots/:lotCode/withdraw', lazy: () => import('./pages/WithdrawPage.tsx') },
           {

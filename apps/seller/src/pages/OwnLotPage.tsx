@@ -10,10 +10,12 @@ import {
   Notice,
   Page,
   PageHead,
+  Reading,
   Streak,
 } from '@lydite/ui';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { Link, Navigate, useNavigate, useParams } from 'react-router-dom';
+import { amountWords, platingWords } from '../features/lines/line-words.ts';
 import { listingFacts } from '../features/listing/listing-words.ts';
 import { listedLotQuery, myLotQuery, useCopyLot } from '../features/lots/lots.queries.ts';
 import { standingOf } from '../features/lots/lot-stage.ts';
@@ -66,6 +68,18 @@ function Listed({ own }: { own: MyLotView }) {
           <div>
             <h2>As you listed it</h2>
             {lot.description && <p className="mt-2 whitespace-pre-line">{lot.description}</p>}
+            <ul className="ruled mt-3">
+              {lot.lines.map((line) => (
+                <li key={line.id}>
+                  <b>{line.label}</b>
+                  <p className="small mute">
+                    {[line.label === line.className ? null : line.className, amountWords(line), platingWords(line)]
+                      .filter(Boolean)
+                      .join(', ')}
+                  </p>
+                </li>
+              ))}
+            </ul>
             <FactList facts={listingFacts(own.draft, words.money)} />
           </div>
           <Photos lot={lot} />
@@ -107,55 +121,58 @@ function Head({ own, lot }: { own: MyLotView; lot: LotView }) {
 function Bench({ own, lot }: { own: MyLotView; lot: LotView }) {
   const { money } = useWords();
   const { sellerFeeBp } = useMarket();
-  const copy = useCopyLot(own.code);
-  const navigate = useNavigate();
-  const mayWithdraw = own.state === 'open' && own.bidders === 0;
-  const price = own.priceMinor === null ? null : money(own.priceMinor);
+  const { priceMinor, reserveReached } = own;
+  const isAsking = lot.form === 'asking-price';
   return (
     <div className="bench">
-      <div>
-        <p className="small mute">{lot.form === 'asking-price' ? 'Asking price' : 'Highest bid'}</p>
-        <p className="readout">{price ?? 'None yet'}</p>
-        <p className="tiny mute">
-          {lot.form === 'asking-price' ? 'The first to take it has it' : counted(own.bidders, 'bidder')}
-        </p>
-      </div>
-      {own.reserveReached !== null && (
-        <div>
-          <p className="small mute">Your lowest price</p>
-          <p className="readout">{money(own.draft.sale.reserveMinor ?? 0)}</p>
-          <p className="tiny mute">{own.reserveReached ? 'It is reached' : 'It is not reached yet'}</p>
-        </div>
+      <Reading
+        name={isAsking ? 'Asking price' : 'Highest bid'}
+        value={priceMinor === null ? 'None yet' : money(priceMinor)}
+      >
+        {isAsking ? 'The first to take it has it' : counted(own.bidders, 'bidder')}
+      </Reading>
+      {reserveReached !== null && (
+        <Reading name="Your lowest price" value={money(own.draft.sale.reserveMinor ?? 0)}>
+          {reserveReached ? 'It is reached' : 'It is not reached yet'}
+        </Reading>
       )}
-      {own.priceMinor !== null && (
-        <div>
-          <p className="small mute">In hand at that price</p>
-          <p className="readout">
-            {money(inHandMinor(own.priceMinor, { sellerFeeBp, freightMinor: lot.delivery.freightMinor }))}
-          </p>
-          <p className="tiny mute">With freight, after the market’s fee</p>
-        </div>
-      )}
-      <div className="bench-go">
-        {own.dealCode && (
-          <Link to={`/deals/${own.dealCode}`} className={buttonClass('primary')}>
-            Go to the deal
-          </Link>
-        )}
-        {mayWithdraw && (
-          <Link to={`/lots/${own.code}/withdraw`} className={buttonClass()}>
-            Withdraw it
-          </Link>
-        )}
-        <Button
-          busy={copy.isPending && 'Copying'}
-          onClick={() => copy.mutate(undefined, { onSuccess: ({ code }) => void navigate(`/lots/${code}/photos`) })}
+      {priceMinor !== null && (
+        <Reading
+          name="In hand at that price"
+          value={money(inHandMinor(priceMinor, { sellerFeeBp, freightMinor: lot.delivery.freightMinor }))}
         >
-          Copy to a new draft
-        </Button>
-        <Refusal>{copy.error?.message}</Refusal>
-        {own.state === 'open' && own.bidders > 0 && 'Bids are binding, so it can be withdrawn only by the desk.'}
-      </div>
+          With freight, after the market’s fee
+        </Reading>
+      )}
+      <Actions own={own} />
+    </div>
+  );
+}
+
+function Actions({ own }: { own: MyLotView }) {
+  const copy = useCopyLot(own.code);
+  const navigate = useNavigate();
+  const isOpen = own.state === 'open';
+  return (
+    <div className="bench-go">
+      {own.dealCode && (
+        <Link to={`/deals/${own.dealCode}`} className={buttonClass('primary')}>
+          Go to the deal
+        </Link>
+      )}
+      {isOpen && own.bidders === 0 && (
+        <Link to={`/lots/${own.code}/withdraw`} className={buttonClass()}>
+          Withdraw it
+        </Link>
+      )}
+      <Button
+        busy={copy.isPending && 'Copying'}
+        onClick={() => copy.mutate(undefined, { onSuccess: ({ code }) => void navigate(`/lots/${code}/photos`) })}
+      >
+        Copy to a new draft
+      </Button>
+      <Refusal>{copy.error?.message}</Refusal>
+      {isOpen && own.bidders > 0 && 'Bids are binding, so it can be withdrawn only by the desk.'}
     </div>
   );
 }

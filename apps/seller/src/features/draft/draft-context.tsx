@@ -15,6 +15,7 @@ export function DraftProvider({ memberId, lot, kept, children }: DraftProviderPr
   useEffect(() => {
     const save = () => void keeper.flush();
     const look = () => void (document.hidden ? keeper.flush() : keeper.refresh());
+    void keeper.keepHere();
     save();
     addEventListener('online', save);
     addEventListener('pagehide', save);
@@ -29,7 +30,7 @@ export function DraftProvider({ memberId, lot, kept, children }: DraftProviderPr
   return <Context value={keeper}>{children}</Context>;
 }
 
-export type Draft = DraftSnapshot & Omit<DraftKeeper, 'snapshot' | 'subscribe' | 'stop'>;
+export type Draft = DraftSnapshot & Omit<DraftKeeper, 'snapshot' | 'subscribe' | 'keepHere' | 'stop'>;
 
 /** The draft of the page and what can be done with it. Only below a `DraftProvider`. */
 export function useDraft(): Draft {

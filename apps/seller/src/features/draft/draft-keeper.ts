@@ -59,6 +59,7 @@ export function createDraftKeeper({ lot, kept, save, reload, mirror }: KeeperPar
     snapshot = { ...snapshot, ...change };
     for (const listener of listeners) listener();
   };
+  /** Copies the draft to the device. */
   const keepHere = async () => {
     clearTimeout(mirrorTimer);
     mirrorTimer = undefined;
@@ -125,6 +126,7 @@ export function createDraftKeeper({ lot, kept, save, reload, mirror }: KeeperPar
     },
     edit,
     flush,
+    keepHere,
     refresh,
     /** Photos are saved on their own; the page's draft is not touched by them. */
     setPhotos: (photos: MyLotView['photos']) => put({ lot: { ...snapshot.lot, photos } }),

@@ -27,7 +27,7 @@ const countWords: Record<LineDraft['countEvidence'], string> = {
 };
 
 /** How much of it there is, and how that is known: "1,940 pieces counted, 52.1 kg weighed". */
-export function amountWords(line: LineDraft): string {
+export function amountWords(line: Pick<LineDraft, 'pieces' | 'countEvidence' | 'massG' | 'massEvidence'>): string {
   const pieces = line.pieces === null ? null : `${counted(line.pieces, 'piece')} ${countWords[line.countEvidence]}`;
   const mass = line.massG === null ? null : `${formatMassG(line.massG)} ${line.massEvidence}`;
   return [pieces, mass].filter(Boolean).join(', ') || 'Amount not given yet';

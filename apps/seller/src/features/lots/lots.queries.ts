@@ -24,9 +24,14 @@ export const listedLotQuery = (lotCode: string) =>
     refetchInterval: 10_000,
   });
 
+/** Whatever shows lots is asked for again, but for a draft that is being edited: its form is ahead of the market. */
 function useLotChange<Answer>(send: () => Promise<Answer>) {
   const cache = useQueryClient();
-  return useMutation({ mutationFn: send, onSuccess: () => cache.invalidateQueries({ queryKey: ['lots'] }) });
+  return useMutation({
+    mutationFn: send,
+    onSuccess: () =>
+      cache.invalidateQueries({ predicate: ({ queryKey: [noun, view] }) => noun === 'lots' && view !== 'opened' }),
+  });
 }
 
 export const useBeginLot = () => useLotChange(() => call('POST /my/lots'));

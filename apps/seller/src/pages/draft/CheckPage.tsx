@@ -11,6 +11,7 @@ import { listingFacts } from '../../features/listing/listing-words.ts';
 import { ListingPreview } from '../../features/listing/components/ListingPreview.tsx';
 import { useListLot } from '../../features/listing/listing.queries.ts';
 import { amountWords, classOf, lineName, platingWords } from '../../features/lines/line-words.ts';
+import { DeleteDraft } from '../../features/lots/components/DeleteDraft.tsx';
 import { useHashFocus } from '../../lib/use-hash-focus.ts';
 
 /** The lot as buyers will see it, what it still lacks, what the seller declares; and the button that opens it to the market. */
@@ -24,14 +25,13 @@ export function Component() {
   const list = useListLot(flush);
   useHashFocus();
   const isReady = lot.missing.length === 0;
+  /** The device forgets a draft that is none any more. */
+  const leave = (to: string) => {
+    if (member) void forgetKept(member.id, lot.code);
+    void navigate(to, { replace: true });
+  };
   const send = () =>
-    list.mutate(undefined, {
-      onSuccess: () => {
-        if (member) void forgetKept(member.id, lot.code);
-        void navigate(`/lots/${lot.code}`, { replace: true });
-      },
-      onError: () => void refresh(),
-    });
+    list.mutate(undefined, { onSuccess: () => leave(`/lots/${lot.code}`), onError: () => void refresh() });
 
   return (
     <>
@@ -42,7 +42,7 @@ export function Component() {
       <MissingList
         items={lot.missing.map((item) => ({
           message: item.message,
-          page: stepNames[stepOfPart(item.part)],
+          page: item.part === 'declarations' ? 'Below' : stepNames[stepOfPart(item.part)],
           to: `/lots/${lot.code}/${stepOfPart(item.part)}#${item.path}`,
         }))}
       />
@@ -84,6 +84,7 @@ export function Component() {
               : 'Opens when nothing is missing.'}
           </span>
         </div>
+        <DeleteDraft lotCode={lot.code} onDeleted={() => leave('/lots')} />
       </div>
     </>
   );

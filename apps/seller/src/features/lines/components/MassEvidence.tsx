@@ -43,7 +43,7 @@ export function MassEvidence({ id, line, lines, onChange }: MassEvidenceProps) {
       <ChoiceRow
         legend="How do you know the mass?"
         name={`${id}.massEvidence`}
-        value={line.massG === null ? null : line.massEvidence}
+        value={line.massEvidence}
         options={[
           { value: 'weighed', label: 'Weighed', hint: 'on a scale, without packing' },
           { value: 'stated', label: 'Stated', hint: 'from papers, or a guess' },

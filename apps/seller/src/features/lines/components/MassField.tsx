@@ -1,4 +1,5 @@
 import type { LineDraft } from '@lydite/contracts';
+import type { ReactNode } from 'react';
 import { formatNumber, MeasureField } from '@lydite/ui';
 import type { LineChange } from '../line-draft.ts';
 
@@ -7,7 +8,7 @@ const mostG = 100_000_000;
 const mostCharacters = 40;
 
 interface MassFieldProps {
-  label: string;
+  label: ReactNode;
   id?: string;
   line: LineDraft;
   onChange: (change: LineChange) => void;

@@ -21,9 +21,22 @@ export function WeightRow({ index, line, lines, kindName, onChange }: WeightRowP
         <h2>{name}</h2>
         <p className="small mute">{kindName}</p>
       </div>
-      <MassField label={`Net mass of ${name}`} id={`lines.${index}.massG`} line={line} onChange={onChange} />
+      <MassField
+        label={
+          <>
+            Net mass<span className="sr-only"> of {name}</span>
+          </>
+        }
+        id={`lines.${index}.massG`}
+        line={line}
+        onChange={onChange}
+      />
       <Checkbox
-        label="Weighed on this scale"
+        label={
+          <>
+            Weighed<span className="sr-only">: {name}</span>
+          </>
+        }
         checked={line.massEvidence === 'weighed'}
         onChange={(event) =>
           onChange(event.target.checked ? weighedLike(lines) : { massEvidence: 'stated', scaleResolutionG: null })

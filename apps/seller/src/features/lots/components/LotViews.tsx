@@ -12,7 +12,7 @@ export function LotViews({ lots, current }: { lots: readonly MyLotRow[]; current
       {shown.map(({ view, count }) => (
         <Link
           key={view}
-          to={view === 'all' ? '/' : `/?view=${view}`}
+          to={view === 'all' ? '/lots' : `/lots?view=${view}`}
           aria-current={view === current ? 'page' : undefined}
         >
           {viewNames[view]}

@@ -1,6 +1,6 @@
 import { useWords } from '@lydite/client';
 import type { MyLotRow } from '@lydite/contracts';
-import { formatMassG, formatRange } from '@lydite/ui';
+import { formatMassG, StreakInline } from '@lydite/ui';
 import { Link } from 'react-router-dom';
 import { counted } from '../../../lib/counted.ts';
 import { photoSrc } from '../../../lib/photo-src.ts';
@@ -28,9 +28,7 @@ export function LotsTable({ lots }: { lots: readonly MyLotRow[] }) {
               </th>
             ))}
             <th scope="col">Where it stands</th>
-            <th scope="col" className="r">
-              Gold, 8 in 10
-            </th>
+            <th scope="col">Gold, 8 results in 10</th>
           </tr>
         </thead>
         <tbody>
@@ -66,7 +64,9 @@ function WideRow({ lot }: { lot: MyLotRow }) {
       <td className="max-w-56">
         <Stands lot={lot} />
       </td>
-      <td className="r">{goldWords(lot)}</td>
+      <td>
+        <Gold lot={lot} />
+      </td>
     </tr>
   );
 }
@@ -82,12 +82,14 @@ function NarrowRow({ lot }: { lot: MyLotRow }) {
           <Stands lot={lot} />
         </div>
       </div>
-      {lot.goldG && <p className="small mute">{goldWords(lot)} of gold, 8 results in 10</p>}
+      {lot.estimate && <Gold lot={lot} />}
     </li>
   );
 }
 
-const goldWords = ({ goldG }: MyLotRow) => (goldG ? formatRange([goldG.p10, goldG.p90]) : '–');
+function Gold({ lot: { estimate } }: { lot: MyLotRow }) {
+  return estimate ? <StreakInline estimate={estimate} size="inline" /> : <span className="mute">Not listed yet</span>;
+}
 
 function LotCell({ lot }: { lot: MyLotRow }) {
   const { code, title, massG, coverPhotoId } = lot;

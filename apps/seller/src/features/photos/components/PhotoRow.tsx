@@ -33,10 +33,7 @@ export function PhotoRow({ photo, place, count, isBusy, onMove, onDescribe, onRe
       />
       <div className="shot-words">
         <h2>{title}</h2>
-        <p className="small mute">
-          {isCover ? 'Cover. ' : `Photo ${place + 1} of ${count}. `}
-          Sent, position data removed
-        </p>
+        <p className="small mute">{isCover ? 'Cover: the first that buyers see' : `Photo ${place + 1} of ${count}`}</p>
         <TextField
           label="What it shows"
           className="mt-3"

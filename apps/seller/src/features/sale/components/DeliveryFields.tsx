@@ -35,7 +35,7 @@ export function DeliveryFields({ delivery, currency, onChange }: DeliveryFieldsP
           <MoneyField
             label="Freight"
             id="delivery.freightMinor"
-            hint="Paid by the buyer with the price. 0 if you bear it."
+            hint="Paid by the buyer; 0 if you bear it."
             currency={currency}
             amountMinor={delivery.freightMinor}
             onChange={(freightMinor) => onChange({ freightMinor })}

@@ -40,7 +40,7 @@ export function SaleFields({ sale, currency, onChange }: SaleFieldsProps) {
       {sale.form === 'open-bids' ? (
         <div className="field-pair">
           {price('Start price', 'startMinor', 'Where bidding begins.')}
-          {price('Lowest price', 'reserveMinor', 'Below it you do not sell. Buyers read only whether it is reached.')}
+          {price('Lowest price', 'reserveMinor', 'Buyers read only whether it is reached.')}
         </div>
       ) : (
         price('Asking price', 'askingMinor', 'What a buyer pays for the lot, without freight.')
