@@ -1,4 +1,4 @@
-import { useId } from 'react';
+import { useId, type ReactNode } from 'react';
 import { formatNumber } from '../text/format-number.ts';
 import { NotchMark } from './NotchMark.tsx';
 import { gradeShare, gradeTicks } from './streak-axis.ts';
@@ -37,16 +37,24 @@ export function StreakCell({ subject, estimate, breakEvenG, leadBreakEvenG }: St
 interface StreakAxisHeadProps {
   /** Medians of settled assays by kind, as landmarks on the axis. */
   marks?: readonly { name: string; gradeGPerT: number }[];
+  /** What the landmarks are. */
+  marksNote?: string;
+  /** The column's name, where a page makes it a link that sorts. */
+  label?: ReactNode;
 }
 
 /** Head of the list's streak column: the common axis and its landmarks. Stands in a `th` with its own label. */
-export function StreakAxisHead({ marks = [] }: StreakAxisHeadProps) {
+export function StreakAxisHead({
+  marks = [],
+  marksNote = 'Marks: settled assays, by kind',
+  label = 'Grade, grams of gold per tonne',
+}: StreakAxisHeadProps) {
   const left = (share: number) => ({ left: `${(share * 100).toFixed(2)}%` });
   return (
     <>
       <div className="axis-head-names">
-        <span>Grade, grams of gold per tonne</span>
-        {marks.length > 0 && <span>Marks: settled assays, by kind</span>}
+        <span>{label}</span>
+        {marks.length > 0 && <span>{marksNote}</span>}
       </div>
       <div className="axis-head" aria-hidden="true">
         {marks.map(({ name, gradeGPerT }) => (
