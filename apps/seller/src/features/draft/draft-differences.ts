@@ -29,9 +29,8 @@ const lineNames: Partial<Record<keyof LineDraft, string>> = {
   wear: 'Share worn off',
   assay: 'Assay',
 };
-const otherNames: Record<string, string> = {
-  title: 'Title',
-  description: 'Description',
+const headNames: Record<string, string> = { title: 'Title', description: 'Description' };
+const saleNames: Record<string, string> = {
   'sale.form': 'Form of sale',
   'sale.startMinor': 'Start price',
   'sale.reserveMinor': 'Lowest price',
@@ -81,9 +80,8 @@ export function differencesOf(mine: LotDraft, other: LotDraft, currency: string)
   const at = (draft: LotDraft, path: string): unknown =>
     path.split('.').reduce<unknown>((value, key) => (value as Record<string, unknown>)[key], draft);
 
-  const fields = Object.entries(otherNames).flatMap(([path, name]) =>
-    differing(name, path, [at(mine, path), at(other, path)]),
-  );
+  const fields = (names: Record<string, string>) =>
+    Object.entries(names).flatMap(([path, name]) => differing(name, path, [at(mine, path), at(other, path)]));
   const ids = [...new Set([...mine.lines, ...other.lines].map(({ id }) => id))];
   const lines = ids.flatMap((id) => {
     const [here, there] = [mine, other].map((draft) => draft.lines.find((line) => line.id === id));
@@ -96,5 +94,5 @@ export function differencesOf(mine: LotDraft, other: LotDraft, currency: string)
       differing(`${name}, ${lineName}`, key, [here[key as keyof LineDraft], there[key as keyof LineDraft]]),
     );
   });
-  return [...fields.slice(0, 2), ...lines, ...fields.slice(2)];
+  return [...fields(headNames), ...lines, ...fields(saleNames)];
 }
