@@ -1,8 +1,8 @@
-import { normalQuantile } from '../quantity/normal-distribution.ts';
-import { quantileOf } from '../quantity/quantile.ts';
 import type { Quantity } from '../types.ts';
+import { exponentials, mostExponent } from './exponential.ts';
 import { createLattice, type Column } from './lattice.ts';
 import type { Factor, LotPlan, Term } from './lot-plan.types.ts';
+import { normalScores, valuesOf } from './score-table.ts';
 
 export interface PlanDraws {
   goldG: Float64Array;
@@ -23,10 +23,10 @@ interface DrawOptions {
  */
 export function drawPlan(plan: LotPlan, options: DrawOptions): PlanDraws {
   const { draws } = options;
-  const columnOf = createColumns(options);
+  const draw = createTermDrawer(options);
   const lines = plan.lines.map(({ mass, gold }) => {
-    const massG = mass ? drawTerm(mass, draws, columnOf) : new Float64Array(draws);
-    const components = gold.map((term) => drawTerm(term, draws, columnOf));
+    const massG = mass ? draw(mass, new Float64Array(draws)) : new Float64Array(draws);
+    const components = gold.map((term) => draw(term, new Float64Array(draws)));
     return { massG, components, goldG: sumOf(components, draws) };
   });
   return {
@@ -42,6 +42,45 @@ export function drawPlan(plan: LotPlan, options: DrawOptions): PlanDraws {
   };
 }
 
+/** Only the gold of all lines together, in the draws that `drawPlan` would give it but for the order of keys not named. */
+export function drawGold(plan: LotPlan, options: DrawOptions): Float64Array {
+  const draw = createTermDrawer(options);
+  const goldG = new Float64Array(options.draws);
+  const one = new Float64Array(options.draws);
+  for (const term of plan.lines.flatMap(({ gold }) => gold)) add(goldG, draw(term, one));
+  return goldG;
+}
+
+/** Fills an array with the draws of a term and hands it back. */
+type DrawTerm = (term: Term, into: Float64Array) => Float64Array;
+
+function createTermDrawer(options: DrawOptions): DrawTerm {
+  const columnOf = createColumns(options);
+  const scores = normalScores(options.draws);
+  const furthest = scores[options.draws - 1] as number;
+  return ({ constant, factors }, into) => {
+    const logs: Scaled[] = [];
+    // Lognormal figures are added in the log, so a product of many costs one exponential.
+    let [median, reach] = [constant, 0];
+    for (const each of factors) {
+      const column = columnOf(each);
+      if (each.quantity.kind !== 'lognormal') continue;
+      const scale = Math.log(each.quantity.gsd) * each.power;
+      median *= each.quantity.median ** each.power;
+      reach += Math.abs(scale) * furthest;
+      logs.push({ scale, column });
+    }
+    if (reach > mostExponent) throw new RangeError('the spreads given multiply beyond any number');
+    if (logs.length === 0) into.fill(median);
+    else {
+      fillWithSums(into, scores, logs);
+      exponentials(into, median);
+    }
+    for (const each of factors) if (each.quantity.kind !== 'lognormal') multiplyBy(into, each, columnOf(each));
+    return into;
+  };
+}
+
 /** Hands each factor its coordinate; the same key, the same coordinate. */
 function createColumns({ seed, draws, keys = [] }: DrawOptions): (factor: Factor) => Column {
   const coordinate = createLattice(seed, draws);
@@ -53,34 +92,47 @@ function createColumns({ seed, draws, keys = [] }: DrawOptions): (factor: Factor
   };
 }
 
-function drawTerm({ constant, factors }: Term, draws: number, columnOf: (factor: Factor) => Column): Float64Array {
-  const product = new Float64Array(draws);
-  const scores = normalScores(draws);
-  // Lognormal figures are added in the log, so a product of many costs one exponential.
-  let median = constant;
-  for (const each of factors) {
-    const column = columnOf(each);
-    if (each.quantity.kind !== 'lognormal') continue;
-    median *= each.quantity.median ** each.power;
-    addScaled(product, scores, column, Math.log(each.quantity.gsd) * each.power);
-  }
-  for (let i = 0; i < draws; i += 1) product[i] = median * Math.exp(product[i] as number);
-  for (const each of factors) {
-    const { quantity, power } = each;
-    if (quantity.kind === 'lognormal') continue;
-    if (quantity.kind === 'uniform' && power === 1) multiplyUniform(product, quantity, columnOf(each));
-    else multiply(product, valuesOf(quantity, power, draws), columnOf(each));
-  }
-  return product;
+interface Scaled {
+  scale: number;
+  column: Column;
 }
 
-function addScaled(sum: Float64Array, values: Float64Array, { generator, shift }: Column, scale: number): void {
-  const draws = sum.length;
-  for (let i = 0, at = shift; i < draws; i += 1) {
-    sum[i] = (sum[i] as number) + scale * (values[at] as number);
-    at += generator;
-    if (at >= draws) at -= draws;
+const nothing: Scaled = { scale: 0, column: { generator: 0, shift: 0 } };
+
+/** Σ scale · score, two figures at a time: half as many ways through memory. */
+function fillWithSums(sum: Float64Array, scores: Float64Array, figures: readonly Scaled[]): void {
+  for (let i = 0; i < figures.length; i += 2) {
+    const [one, other] = [figures[i] as Scaled, figures[i + 1] ?? nothing];
+    if (i === 0) fillWithPair(sum, scores, one, other);
+    else addPair(sum, scores, one, other);
   }
+}
+
+function fillWithPair(sum: Float64Array, scores: Float64Array, a: Scaled, b: Scaled): void {
+  const [draws, stepA, stepB, scaleA, scaleB] = [sum.length, a.column.generator, b.column.generator, a.scale, b.scale];
+  for (let i = 0, atA = a.column.shift, atB = b.column.shift; i < draws; i += 1) {
+    sum[i] = scaleA * (scores[atA] as number) + scaleB * (scores[atB] as number);
+    atA += stepA;
+    if (atA >= draws) atA -= draws;
+    atB += stepB;
+    if (atB >= draws) atB -= draws;
+  }
+}
+
+function addPair(sum: Float64Array, scores: Float64Array, a: Scaled, b: Scaled): void {
+  const [draws, stepA, stepB, scaleA, scaleB] = [sum.length, a.column.generator, b.column.generator, a.scale, b.scale];
+  for (let i = 0, atA = a.column.shift, atB = b.column.shift; i < draws; i += 1) {
+    sum[i] = (sum[i] as number) + scaleA * (scores[atA] as number) + scaleB * (scores[atB] as number);
+    atA += stepA;
+    if (atA >= draws) atA -= draws;
+    atB += stepB;
+    if (atB >= draws) atB -= draws;
+  }
+}
+
+function multiplyBy(product: Float64Array, { quantity, power }: Factor, column: Column): void {
+  if (quantity.kind === 'uniform' && power === 1) multiplyUniform(product, quantity, column);
+  else multiply(product, valuesOf(quantity, power, product.length), column);
 }
 
 function multiply(product: Float64Array, values: Float64Array, { generator, shift }: Column): void {
@@ -93,14 +145,10 @@ function multiply(product: Float64Array, values: Float64Array, { generator, shif
 }
 
 /** The most common figure without a table of its values. */
-function multiplyUniform(
-  product: Float64Array,
-  { lo, hi }: { lo: number; hi: number },
-  { generator, shift }: Column,
-): void {
+function multiplyUniform(product: Float64Array, range: Range, { generator, shift }: Column): void {
   const draws = product.length;
-  const step = (hi - lo) / draws;
-  const first = lo + step / 2;
+  const step = (range.hi - range.lo) / draws;
+  const first = range.lo + step / 2;
   for (let i = 0, at = shift; i < draws; i += 1) {
     product[i] = (product[i] as number) * (first + step * at);
     at += generator;
@@ -108,37 +156,17 @@ function multiplyUniform(
   }
 }
 
-/** Equally likely values of the quantity, ascending before the power is taken. */
-function valuesOf(quantity: Quantity, power: number, draws: number): Float64Array {
-  const values = new Float64Array(draws);
-  if (quantity.kind === 'normal' && quantity.mean > farFromZero * quantity.sd) {
-    const scores = normalScores(draws);
-    for (let i = 0; i < draws; i += 1) values[i] = quantity.mean + quantity.sd * (scores[i] as number);
-  } else {
-    for (let i = 0; i < draws; i += 1) values[i] = quantileOf(quantity, (i + 0.5) / draws);
-  }
-  return power === 1 ? values : values.map((value) => value ** power);
-}
-
-/** In standard deviations: from here on cutting a normal at 0 changes no digit. */
-const farFromZero = 8.5;
-
-// A pure table, kept since every simulation of this size reads it.
-const scoreTables = new Map<number, Float64Array>();
-function normalScores(draws: number): Float64Array {
-  const known = scoreTables.get(draws);
-  if (known) return known;
-  const scores = new Float64Array(draws);
-  for (let i = 0; i < draws; i += 1) scores[i] = normalQuantile((i + 0.5) / draws);
-  scoreTables.set(draws, scores);
-  return scores;
-}
+type Range = Pick<Extract<Quantity, { kind: 'uniform' }>, 'lo' | 'hi'>;
 
 function sumOf(parts: readonly Float64Array[], draws: number): Float64Array {
   const [first, ...others] = parts;
   if (!first) return new Float64Array(draws);
   if (others.length === 0) return first;
   const sum = Float64Array.from(first);
-  for (const part of others) for (let i = 0; i < draws; i += 1) sum[i] = (sum[i] as number) + (part[i] as number);
+  for (const part of others) add(sum, part);
   return sum;
+}
+
+function add(sum: Float64Array, part: Float64Array): void {
+  for (let i = 0; i < sum.length; i += 1) sum[i] = (sum[i] as number) + (part[i] as number);
 }

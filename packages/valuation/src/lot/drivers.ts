@@ -1,6 +1,6 @@
 import type { Catalogue } from '../catalogue/catalogue.types.ts';
 import type { Driver, LineEstimate, LotInput, Quantiles } from '../types.ts';
-import { drawPlan } from './draw-plan.ts';
+import { drawGold } from './draw-plan.ts';
 import type { LinePlan, LotPlan } from './lot-plan.types.ts';
 import { improveLot, measurementOf } from './measurement.ts';
 import { planLot } from './plan-lot.ts';
@@ -10,7 +10,7 @@ import { varianceShares, type FactorShare } from './variance.ts';
 const mostDrivers = 6;
 const leastShare = 0.005;
 /** Enough for the ratio of two ranges drawn alike; prime, so that any generator serves. */
-const draws = 1021;
+export const driverDraws = 1021;
 
 export interface DriverInput {
   input: LotInput;
@@ -24,12 +24,14 @@ export interface DriverInput {
 /** What the range of a lot comes from, largest share first, with the measurement that would narrow it and by how much. */
 export function driversOf(given: DriverInput): Driver[] {
   const { plan, seed, quantiles } = given;
+  const shares = largestShares(plan);
+  if (shares.length === 0) return [];
   const nowG: [number, number] = [quantiles.p10, quantiles.p90];
-  const now = rangeOf(plan, seed, keysOf(plan));
-  const expect = createExpectation(given);
-  const shares = varianceShares(plan).filter(({ share }) => share >= leastShare);
-  return shares.slice(0, mostDrivers).map((each) => {
-    const { question, lines, after } = expect(each);
+  const rangeOf = createRangeFinder(seed, keysOf(plan));
+  const now = rangeOf(plan);
+  const measured = createMeasurer(given, (after) => rangeOf(after));
+  return shares.map((each) => {
+    const { question, lines, after } = measured(each);
     return {
       lineId: lines.length === 1 ? (lines[0] as LinePlan).input.id : null,
       classCode: (lines[0] as LinePlan).materialClass.code,
@@ -42,10 +44,24 @@ export function driversOf(given: DriverInput): Driver[] {
   });
 }
 
-/** The measurement for a figure and the range expected after it; figures that one measurement answers share its range. */
-function createExpectation({ input, catalogue, plan, seed, lines: estimates }: DriverInput) {
-  const known = new Map<string, [number, number]>();
-  const keys = keysOf(plan);
+/** The lot as it would be planned after each measurement that its drivers name, each once. */
+export function plansAfterDrivers(given: Omit<DriverInput, 'quantiles' | 'seed'>): LotPlan[] {
+  const measured = createMeasurer(given, (after) => after);
+  return [...new Set(largestShares(given.plan).map((each) => measured(each).after))];
+}
+
+function largestShares(plan: LotPlan): FactorShare[] {
+  return varianceShares(plan)
+    .filter(({ share }) => share >= leastShare)
+    .slice(0, mostDrivers);
+}
+
+/** The measurement for a figure and what is made of the lot after it; figures that one measurement answers share that. */
+function createMeasurer<Made>(
+  { input, catalogue, plan, lines: estimates }: Omit<DriverInput, 'quantiles' | 'seed'>,
+  make: (after: LotPlan) => Made,
+) {
+  const known = new Map<string, Made>();
   return ({ factor }: FactorShare) => {
     const lines = plan.lines.filter(({ gold }) =>
       gold.some((term) => term.factors.some(({ key }) => key === factor.key)),
@@ -54,16 +70,16 @@ function createExpectation({ input, catalogue, plan, seed, lines: estimates }: D
     const measurement = measurementOf(factor, first.input);
     const question = measurement.ask(lines.length === 1 ? first.label : `the ${first.materialClass.unit.many}`);
     const after =
-      known.get(question) ??
-      rangeOf(planLot(improveLot(input, measurement, lines, factor, estimates), catalogue), seed, keys);
+      known.get(question) ?? make(planLot(improveLot(input, measurement, lines, factor, estimates), catalogue));
     known.set(question, after);
     return { question, lines, after };
   };
 }
 
-function rangeOf(plan: LotPlan, seed: number, keys: readonly string[]): [number, number] {
-  const { goldG } = drawPlan(plan, { seed, draws, keys });
-  return createQuantileFinder(draws)(goldG, [0.1, 0.9]) as [number, number];
+/** p10 and p90 of a plan's gold from a small sample; plans drawn with the same keys differ only where the plans do. */
+function createRangeFinder(seed: number, keys: readonly string[]): (plan: LotPlan) => [number, number] {
+  const find = createQuantileFinder(driverDraws);
+  return (plan) => find(drawGold(plan, { seed, draws: driverDraws, keys }), [0.1, 0.9]) as [number, number];
 }
 
 /** The figures of a lot, each once. */
