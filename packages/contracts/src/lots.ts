@@ -12,6 +12,8 @@ export const myLotRow = z
     coverPhotoId: z.uuid().nullable(),
     massG: z.number().nullable(),
     goldG: z.object({ p10: z.number(), p50: z.number(), p90: z.number() }).nullable(),
+    /** What its streak is drawn from; null for a draft, whose estimate is not frozen yet. */
+    estimate: outline.nullable(),
     priceMinor: amountMinor.nullable(),
     bidders: z.int(),
     closesAt: isoTime.nullable(),

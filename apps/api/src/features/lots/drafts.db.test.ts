@@ -105,6 +105,8 @@ test('own lots say what is to be done, the last touched first', async () => {
   expect(rows[1]).toMatchObject({ code: lotCode, title: completeDraft().title, massG: 12_400, goldG: null });
   expect(rows[2]).toMatchObject({ code: listed, coverPhotoId: expect.any(String), bidders: 0, dealCode: null });
   expect(rows[2]!.goldG!.p10).toBeLessThan(rows[2]!.goldG!.p50);
+  expect(rows[1]!.estimate).toBeNull();
+  expect(rows[2]!.estimate!.goldG.p50).toBe(rows[2]!.goldG!.p50);
 });
 
 test('somebody else’s lot is not found by any call on it; a buyer has no lots', async () => {

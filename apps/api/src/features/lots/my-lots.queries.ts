@@ -1,5 +1,6 @@
 import type { MyLotRow } from '@lydite/contracts';
 import type { EntityManager } from 'typeorm';
+import { toOutline, type OutlineParts } from '../estimates/estimates.reads.ts';
 import { dutyOf, type DutyFacts } from './duty.rules.ts';
 
 interface Row extends DutyFacts {
@@ -9,6 +10,7 @@ interface Row extends DutyFacts {
   coverPhotoId: string | null;
   massG: number | null;
   goldG: MyLotRow['goldG'];
+  estimate: OutlineParts | null;
   priceMinor: number | null;
   bidders: number;
   closesAt: Date | null;
@@ -21,6 +23,8 @@ const sql = `
   select l.code, l.state, coalesce(l.title, l.draft ->> 'title') as title, coalesce(l.cover_photo_id, cover.id) as "coverPhotoId",
          coalesce(l.mass_g, mass.g)::float8 as "massG",
          case when e.id is not null then jsonb_build_object('p10', e.gold_p10_g, 'p50', e.gold_p50_g, 'p90', e.gold_p90_g) end as "goldG",
+         case when e.id is not null then jsonb_build_object('massG', e.result -> 'massG', 'goldG', e.result #> '{goldG,quantiles}',
+           'gradeGPerT', e.result -> 'gradeGPerT', 'density', e.result -> 'density') end as estimate,
          (case l.form when 'asking-price' then l.asking_minor else l.price_minor end)::int as "priceMinor", l.bidders,
          l.closes_at as "closesAt", l.delivery_way as "deliveryWay", d.code as "dealCode", d.state as "dealState", d.due_at as "dealDueAt",
          d.frozen_at is not null as frozen, w.countersign_ends_at as "countersignBy", t.deal_id is not null as "payoutWaits",
@@ -54,6 +58,7 @@ function toMyLotRow(row: Row): MyLotRow {
     coverPhotoId,
     massG,
     goldG,
+    estimate: row.estimate && toOutline(row.estimate),
     priceMinor,
     bidders,
     closesAt: row.closesAt?.toISOString() ?? null,
