@@ -20,7 +20,7 @@ const refusal = (code: 'network' | 'lot.changed' | 'lot.wrong_state' | 'request.
 /** A market that keeps one draft by the rules of versions, and can be told to fail. */
 function market(lot: MyLotView = aLot()) {
   const state = { lot, failWith: null as Error | null, saves: 0, kept: undefined as KeptDraft | undefined };
-  const save = vi.fn(async ({ version, draft }: KeptDraft) => {
+  const save = vi.fn<(request: KeptDraft) => Promise<MyLotView>>(async ({ version, draft }) => {
     await Promise.resolve();
     if (state.failWith) throw state.failWith;
     if (version !== state.lot.version) throw refusal('lot.changed', { context: { current: state.lot } });
