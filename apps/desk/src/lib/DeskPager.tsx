@@ -7,6 +7,8 @@ interface DeskPagerProps {
   noun: string;
 }
 
+const step = 'inline-flex min-h-11 items-center';
+
 export function DeskPager({ page: { page, pageSize, total, rows }, noun }: DeskPagerProps) {
   const { q } = useDeskSearch();
   const to = (next: number) => `?${new URLSearchParams({ ...(q ? { q } : {}), page: String(next) }).toString()}`;
@@ -17,8 +19,20 @@ export function DeskPager({ page: { page, pageSize, total, rows }, noun }: DeskP
       to={first + rows.length}
       total={total}
       noun={noun}
-      previous={page > 1 ? <Link to={to(page - 1)}>Previous</Link> : null}
-      next={first + rows.length < total ? <Link to={to(page + 1)}>Next</Link> : null}
+      previous={
+        page > 1 ? (
+          <Link className={step} to={to(page - 1)}>
+            Previous
+          </Link>
+        ) : null
+      }
+      next={
+        first + rows.length < total ? (
+          <Link className={step} to={to(page + 1)}>
+            Next
+          </Link>
+        ) : null
+      }
     />
   );
 }

@@ -25,7 +25,7 @@ export function DeskTable<Row extends RowData>({ caption, columns, rows, rowId }
     onSortingChange: setSorting,
   });
   return (
-    <div className="table-scroll" role="region" aria-label={caption} tabIndex={0}>
+    <div className="table-scroll relative" role="region" aria-label={`${caption}, table`} tabIndex={0}>
       <table className="table table-dense">
         <caption className="sr-only">{caption}</caption>
         <thead>

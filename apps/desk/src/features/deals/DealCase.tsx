@@ -15,7 +15,7 @@ export function DealCase({ deal }: { deal: DeskDeal }) {
         <span>
           Deal <span className="mono">{deal.code}</span>
         </span>
-        <a href={`/lots/${deal.lotCode}`}>
+        <a className="link-row" href={`/lots/${deal.lotCode}`}>
           Lot <span className="mono">{deal.lotCode}</span>
         </a>
         <span>

@@ -3,7 +3,7 @@ import type { LedgerReport } from '@lydite/contracts';
 /** Every check with what it found; what fails stands out by its word. */
 export function ChecksTable({ checks }: { checks: LedgerReport['checks'] }) {
   return (
-    <div className="table-scroll" role="region" aria-label="Checks" tabIndex={0}>
+    <div className="table-scroll relative" role="region" aria-label="Checks, table" tabIndex={0}>
       <table className="table table-dense">
         <caption className="sr-only">Checks</caption>
         <thead>

@@ -57,7 +57,9 @@ function Group({ title, deals }: { title: string; deals: readonly DealRow[] }) {
             <div className="lot-cell">
               <LotThumb photoId={deal.coverPhotoId} />
               <div>
-                <Link to={`/deals/${deal.code}`}>{deal.title}</Link>
+                <Link to={`/deals/${deal.code}`} className="py-0.5">
+                  {deal.title}
+                </Link>
                 <p>
                   <span className="mono">{deal.code}</span> for lot <span className="mono">{deal.lotCode}</span>
                 </p>

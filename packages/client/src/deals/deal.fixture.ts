@@ -1,0 +1,30 @@
+import type { DealView } from '@lydite/contracts';
+
+/** A deal of a buyer who has still to pay. */
+export const someDeal = (part: Partial<DealView> = {}): DealView => ({
+  code: 'D-1',
+  lotCode: 'L-1',
+  title: 'Memory modules',
+  coverPhotoId: null,
+  massG: 10_000,
+  pieces: null,
+  state: 'awaiting_payment',
+  frozen: false,
+  side: 'buyer',
+  counterparty: null,
+  priceMinor: 100_000,
+  freightMinor: 2_000,
+  buyerFeeMinor: 2_000,
+  sellerFeeMinor: 4_000,
+  holdMinor: 104_000,
+  payment: { state: 'none', message: '' },
+  delivery: { way: 'seller-sends', place: 'Vennaby', hours: '', carrier: null, trackingCode: null },
+  weighIn: null,
+  claim: null,
+  settlement: null,
+  due: { what: 'Pay into hold', at: '2026-12-03T17:00:00Z', ifMissed: 'The award lapses.' },
+  chain: [],
+  events: [],
+  actions: [],
+  ...part,
+});
