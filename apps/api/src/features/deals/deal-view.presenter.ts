@@ -1,4 +1,4 @@
-import type { DealView, PhotoView, WeighInView } from '@lydite/contracts';
+import type { DealView, PhotoView, SettlementView, WeighInView } from '@lydite/contracts';
 import { feeMinor } from '../../platform/fee-minor.ts';
 import type { Words } from '../../platform/words.ts';
 import type { WeighInFacts } from '../deliveries/deliveries.reads.ts';
@@ -43,7 +43,8 @@ export function toDealView(facts: DealFacts): DealView {
     buyerFeeMinor: feeMinor(deal.priceMinor, deal.buyerFeeBp),
     sellerFeeMinor: feeMinor(deal.priceMinor, deal.sellerFeeBp),
     holdMinor: deal.holdMinor,
-    payment,
+    // Why a bank declined is the buyer's alone, as what a transfer waits for is the seller's.
+    payment: side === 'buyer' ? payment : { ...payment, message: '' },
     delivery: {
       way: lot.deliveryWay,
       place: lot.place,
@@ -53,7 +54,7 @@ export function toDealView(facts: DealFacts): DealView {
     },
     weighIn: weighIn && toWeighInView(weighIn, facts.weighInPhotos),
     claim: claim && { ground: claim.ground, adjustmentMinor: claim.adjustmentMinor, at: claim.at.toISOString() },
-    settlement,
+    settlement: settlement && (side === 'seller' ? settlement : withoutReason(settlement)),
     due: toDueView(dueWords(deal, weighIn, side, now)),
     chain: chainOf({ deal, way: lot.deliveryWay, weighIn, settlement, viewer, words }),
     events: events.map((event) => toEventView(event, viewer, words)),
@@ -69,6 +70,11 @@ export function toDealView(facts: DealFacts): DealView {
     }),
   };
 }
+
+const withoutReason = (settlement: SettlementView): SettlementView => ({
+  ...settlement,
+  transfer: settlement.transfer && { ...settlement.transfer, reason: '' },
+});
 
 /** Late from the moment the time is over, whether or not the clock's own step has run yet. */
 export const isDispatchLate = ({ dueKind, dueAt }: Pick<Deal, 'dueKind' | 'dueAt'>, now: Date): boolean =>

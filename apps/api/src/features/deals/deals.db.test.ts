@@ -67,7 +67,11 @@ describe('a deal from award to settlement', () => {
     expect(settled.body.settlement?.transfer?.state).toBe('waiting');
     expect(settled.body.settlement?.hash).toMatch(/^[0-9a-f]{64}$/);
     expect(await balances(deal)).toEqual({ 'hold.deal': 0, 'payable.seller': 88_200 });
-    expect((await view(deal, 'buyer')).settlement).toEqual(settled.body.settlement);
+    const { settlement } = settled.body;
+    expect((await view(deal, 'buyer')).settlement).toEqual({
+      ...settlement,
+      transfer: { ...settlement!.transfer, reason: '' },
+    });
     const steps = settled.body.settlement!.sellerSteps;
     expect(steps.map(({ label }) => label)).toEqual(['Value', 'Freight', 'Seller’s fee', 'To the seller']);
     expect(settled.body.events.map(({ title }) => title)).toEqual([
@@ -86,6 +90,26 @@ describe('a deal from award to settlement', () => {
       'Vennaby Recovery',
       'Vennaby Recovery',
     ]);
+  });
+
+  test('what the bank says is for the buyer alone, what the transfer waits for for the seller alone', async () => {
+    const deal = await addDeal(market);
+    const declined = 'There is not enough money on the card or account. Use another one.';
+    await market.db.query(
+      `insert into payments (id, deal_id, attempt, amount_minor, state, message) values (gen_random_uuid(), $1, 7, 1, 'failed', $2)`,
+      [deal.id, declined],
+    );
+    expect((await view(deal, 'buyer')).payment).toEqual({ state: 'failed', message: declined });
+    expect((await view(deal, 'seller')).payment).toEqual({ state: 'failed', message: '' });
+
+    await bringToReceipt(market, deal);
+    await must(weighIn(deal, 12_400));
+    const params = { dealCode: deal.code };
+    await must((await deal.seller()).call('POST /deals/:dealCode/countersign', { params }));
+    await must((await deal.buyer()).call('POST /deals/:dealCode/accept', { params }));
+    const transfer = async (side: 'seller' | 'buyer') => (await view(deal, side)).settlement?.transfer;
+    expect(await transfer('seller')).toMatchObject({ state: 'waiting', reason: 'Set up your payout account.' });
+    expect(await transfer('buyer')).toMatchObject({ state: 'waiting', reason: '' });
   });
 
   test('two settling steps at once settle once', async () => {

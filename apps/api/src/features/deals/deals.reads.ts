@@ -71,12 +71,16 @@ export async function dealViewOf(
     claim: await tx.findOneBy(Claim, { dealId: deal.id }),
     settlement: await settlementOf(tx, deal.id),
     payment: await paymentStanding(tx, deal.id),
-    counterparty: deal.paidAt ? await nameOf(tx, side === 'seller' ? deal.buyerId : deal.sellerId) : null,
+    counterparty: wasHeld(deal) ? await nameOf(tx, side === 'seller' ? deal.buyerId : deal.sellerId) : null,
     events: await tx.find(DealEvent, { where: { dealId: deal.id }, order: { id: 'ASC' } }),
     now: await marketNow(tx),
     words: createWords(await marketTerms(tx)),
   });
 }
+
+/** The deal took the payment: one that came after its end introduces nobody. */
+const wasHeld = ({ paidAt, endedAt }: Pick<Deal, 'paidAt' | 'endedAt'>): boolean =>
+  paidAt !== null && (endedAt === null || paidAt < endedAt);
 
 /** Name and place of a member, for the other side of a deal that is held. */
 export async function nameOf(tx: EntityManager, memberId: string): Promise<{ name: string; place: string }> {
