@@ -53,6 +53,8 @@ describe('missed deadlines', () => {
     const deal = await addDeal(market);
     await miss(deal);
     expect(await payIn(market, deal)).toBe('refunded');
+    expect((await view(deal)).counterparty).toBeNull();
+    expect((await view(deal, 'seller')).counterparty).toBeNull();
     expect(await hold(deal)).toBe(0);
     const refunds: unknown[] = await market.db.query(
       'select amount_minor::int, state from refunds where deal_id = $1',
@@ -86,6 +88,18 @@ describe('missed deadlines', () => {
     expect(await view(deal)).toMatchObject({ state: 'dispatched', actions: ['receive'] });
     expect((await view(deal)).events.at(-1)?.title).toBe('Did not arrive in time');
     expect(await noticesOf(deal.sellerId, 'receipt_missed')).toHaveLength(1);
+  });
+
+  test('a weigh-in that comes too late is refused, whether or not the clock’s own step has run', async () => {
+    const deal = await addDeal(market);
+    await bringToReceipt(market, deal);
+    await passDeadline(market, deal);
+    expect((await weighIn(deal, 11_000)).problem).toMatchObject({
+      code: 'deal.wrong_state',
+      detail: expect.stringContaining('the declared mass stands'),
+    });
+    await sweep();
+    expect((await view(deal)).weighIn).toMatchObject({ netG: 12_400 });
   });
 
   test('not weighed in: the declared mass stands, and the claim days end it', async () => {

@@ -3,9 +3,9 @@ import { describe, expect, test } from 'vitest';
 import type { AppError } from '../../platform/app-error.ts';
 import { assertPlausible, massAdjustment, netOf, toleranceOf } from './weigh-in.rules.ts';
 
-const refusal = (grossG: number, tareG: number, declaredG: number): AppError => {
+const refusal = (grossG: number, tareG: number, declaredG: number, scaleResolutionG = 1): AppError => {
   try {
-    assertPlausible({ grossG, tareG }, declaredG);
+    assertPlausible({ grossG, tareG, scaleResolutionG }, declaredG);
   } catch (error) {
     return error as AppError;
   }
@@ -19,10 +19,11 @@ describe('a weigh-in', () => {
   test('is refused when the tare is the gross mass or more, or the net is over three times the declared', () => {
     expect(refusal(400, 400, 1000).fields).toEqual([{ path: 'tareG', message: expect.stringContaining('swapped') }]);
     expect(refusal(3001.001, 0.001, 1000).fields[0]).toMatchObject({ path: 'grossG' });
-    expect(() => assertPlausible({ grossG: 3000, tareG: 0 }, 1000)).not.toThrow();
+    expect(() => assertPlausible({ grossG: 3000, tareG: 0, scaleResolutionG: 0.0001 }, 1000)).not.toThrow();
   });
   test('is refused below the milligram, which would not be kept', () => {
     expect(refusal(1000.0001, 0, 1000)).toMatchObject({ code: 'weigh_in.implausible', fields: [{ path: 'grossG' }] });
+    expect(refusal(1000, 0, 1000, 0.00001)).toMatchObject({ fields: [{ path: 'scaleResolutionG' }] });
   });
 });
 

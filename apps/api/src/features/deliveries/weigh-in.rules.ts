@@ -5,7 +5,8 @@ import { massWords } from '../../platform/words.ts';
 
 /** A weigh-in further off than this is a slip of the pen, not a delivery. */
 const mostTimesDeclared = 3;
-const mostDecimalsOfGram = 3;
+/** What the market keeps of a mass, and of a scale's resolution. */
+const decimalsOfGram = { grossG: 3, tareG: 3, scaleResolutionG: 4 } as const;
 
 interface Weighing {
   grossG: number;
@@ -19,14 +20,17 @@ export const netOf = ({ grossG, tareG }: Weighing): number => new Decimal(grossG
  * Refuses a weigh-in that can't be true.
  * @throws AppError weigh_in.implausible naming each field and what to look at
  */
-export function assertPlausible({ grossG, tareG }: Weighing, declaredG: number): void {
-  const fields: FieldError[] = [];
-  const check = (path: string, valueG: number): void => {
-    if (new Decimal(valueG).decimalPlaces() > mostDecimalsOfGram)
-      fields.push({ path, message: 'Give it to the milligram at most.' });
-  };
-  check('grossG', grossG);
-  check('tareG', tareG);
+export function assertPlausible(
+  { grossG, tareG, scaleResolutionG }: Weighing & { scaleResolutionG: number },
+  declaredG: number,
+): void {
+  const given = { grossG, tareG, scaleResolutionG };
+  const fields: FieldError[] = Object.entries(decimalsOfGram)
+    .filter(([path, most]) => new Decimal(given[path as keyof typeof given]).decimalPlaces() > most)
+    .map(([path, most]) => ({
+      path,
+      message: `Give it to the ${most === 3 ? 'milligram' : 'tenth of a milligram'} at most.`,
+    }));
   const netG = netOf({ grossG, tareG });
   if (netG <= 0)
     fields.push({ path: 'tareG', message: 'The tare must be less than the gross mass. Are the two swapped?' });

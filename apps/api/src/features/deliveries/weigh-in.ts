@@ -30,6 +30,7 @@ export const enterWeighIn = (
 ): Promise<DealView> =>
   inTransaction(db, async (tx) => {
     const { deal, now } = await lockOwnDeal(tx, { code: dealCode, side: 'buyer', memberId });
+    assertInTime(deal, now);
     const lot = await lotHeadline(tx, deal.lotId);
     const countersign = await dueAfter(tx, deal, { kind: 'countersign', from: now });
     const claim = await dueAfter(tx, deal, { kind: 'claim', from: now });
@@ -57,6 +58,12 @@ export const enterWeighIn = (
     await tellWeighedIn(tx, deal, { netG, declaredG: lot.massG, countersignBy: countersign.at });
     return dealViewOf(tx, { code: dealCode, memberId });
   });
+
+/** Late from the moment the time is over, whether or not the clock's own step has run yet. */
+function assertInTime({ dueKind, dueAt }: Pick<LockedDeal, 'dueKind' | 'dueAt'>, now: Date): void {
+  if (dueKind === 'weigh_in' && dueAt && now >= dueAt)
+    throw new AppError('deal.wrong_state', 'The time to weigh in is over: the declared mass stands.');
+}
 
 async function assertPhotosOfDeal(tx: EntityManager, dealId: string, photoIds: readonly string[]): Promise<void> {
   const known = new Set((await photosOf(tx, { dealId })).map(({ id }) => id));
