@@ -12,6 +12,7 @@ interface Row extends Omit<DeskDeal, 'dueAt' | 'events'> {
 const dueWords: Record<string, string> = {
   pay: 'Payment into hold',
   dispatch: 'Dispatch',
+  dispatch_late: 'Dispatch, late',
   collect: 'Collection',
   receipt: 'Receipt',
   weigh_in: 'Weigh-in',
@@ -19,6 +20,7 @@ const dueWords: Record<string, string> = {
   claim: 'Claim days',
   answer: 'Answer to the claim',
   approval: 'Operator’s approval',
+  desk: 'The desk',
 };
 
 /** Deals by the next deadline; ended ones last. */

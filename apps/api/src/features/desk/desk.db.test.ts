@@ -69,6 +69,9 @@ test('lots and deals are listed without reserves and ceilings; a search text is 
       events: [{ title: 'Awarded', by: 'The market' }],
     },
   ]);
+  await market.db.query(`update deals set due_kind = 'dispatch_late' where code = $1`, [deals.body.rows[0]!.code]);
+  const late = await operator.call('GET /desk/deals', { query: { q: 'dunnowick' } });
+  expect(late.body.rows[0]!.dueWhat).toBe('Dispatch, late');
   for (const q of ['%', '_', `' or 1=1--`])
     expect((await operator.call('GET /desk/deals', { query: { q } })).body.total).toBe(0);
 });

@@ -10,14 +10,14 @@ export async function findListedLot(tx: EntityManager, lotCode: string): Promise
   return lot;
 }
 
-/** A seller's settled deals, and the median share by which weighed-in masses differed from the declared ones. */
+/** A seller's settled deals, and the median share by which masses that were weighed in differed from the declared ones. */
 export async function sellerRecord(
   tx: EntityManager,
   sellerId: string,
 ): Promise<{ deliveredLots: number; medianMassDifference: number | null }> {
   const rows: { deliveredLots: number; medianMassDifference: number | null }[] = await tx.query(
     `select count(*)::int as "deliveredLots",
-            percentile_cont(0.5) within group (order by abs(w.net_g / l.mass_g - 1)::float8) as "medianMassDifference"
+            percentile_cont(0.5) within group (order by abs(w.net_g / l.mass_g - 1)::float8) filter (where w.entered_by is not null) as "medianMassDifference"
        from deals d join lots l on l.id = d.lot_id left join weigh_ins w on w.deal_id = d.id
       where d.seller_id = $1 and d.state = 'settled'`,
     [sellerId],

@@ -1,10 +1,13 @@
 import { randomUUID } from 'node:crypto';
 import type { LotQuery } from '@lydite/contracts';
 import { afterAll, beforeAll, expect, test } from 'vitest';
+import { addDeal, bringToReceipt, passDeadline, weighIn, must, type TestDeal } from '../../../test/deals.ts';
 import { addMember } from '../../../test/factories.ts';
 import { addDraft, addListedLot, addPrice, addSeller } from '../../../test/listed-lots.ts';
 import { completeDraft, lineOf } from '../../../test/lot-drafts.ts';
 import { openMarket, type Caller, type Market } from '../../../test/market.ts';
+import { jobHandlers } from '../../work.ts';
+import { sellerRecord } from './lot-view.queries.ts';
 
 let market: Market;
 let seller: Caller;
@@ -210,4 +213,23 @@ test('a lot whose close has passed is off the list before any job has closed it'
   expect(body).toMatchObject({ state: 'open', leastNextMinor: null });
   expect(body.chain[1]).toMatchObject({ state: 'now', note: 'Closed, the result is being worked out' });
   expect((await list({ closing: 'today' })).body.total).toBe(0);
+});
+
+test('a seller’s record tells of masses that were weighed, not of a declared mass that stood', async () => {
+  const record = ({ sellerId }: TestDeal) => sellerRecord(market.db.manager, sellerId);
+  const ring = async (deal: TestDeal): Promise<void> => {
+    await passDeadline(market, deal);
+    await jobHandlers(market.world)['deal.deadline'](deal.id);
+  };
+  const weighed = await addDeal(market);
+  await bringToReceipt(market, weighed);
+  await must(weighIn(weighed, 12_276));
+  await ring(weighed);
+  await ring(weighed);
+  expect(await record(weighed)).toEqual({ deliveredLots: 1, medianMassDifference: expect.closeTo(0.01, 6) });
+  const stood = await addDeal(market);
+  await bringToReceipt(market, stood);
+  await ring(stood);
+  await ring(stood);
+  expect(await record(stood)).toEqual({ deliveredLots: 1, medianMassDifference: null });
 });
