@@ -158,8 +158,9 @@ export const payoutAccount = z
     state: z.enum(['none', 'requirements', 'ready']),
     requirements: z.array(z.string()),
     verified: z.boolean(),
-    waitingMinor: amountMinor,
-    payouts: z.array(z.object({ id: z.string(), amountMinor, state: z.string(), at: isoTime })),
+    /** Sums of several deals, and so larger than one amount may be. */
+    waitingMinor: z.int().min(0),
+    payouts: z.array(z.object({ id: z.string(), amountMinor: z.int(), state: z.string(), at: isoTime })),
   })
   .meta({ id: 'PayoutAccount' });
 export type PayoutAccount = z.infer<typeof payoutAccount>;

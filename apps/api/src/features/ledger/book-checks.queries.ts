@@ -77,7 +77,7 @@ export interface Books {
 export async function readBooks(tx: EntityManager, days: number): Promise<Books> {
   const [sums]: { entries: number; processorMinor: number; now: Date }[] = await tx.query(
     `select (select count(*)::int from ledger_entries) as entries, clock_timestamp() as now,
-            coalesce((select balance from ledger_accounts where code = 'asset.processor'), 0)::int as "processorMinor"`,
+            coalesce((select balance from ledger_accounts where code = 'asset.processor'), 0)::float8 as "processorMinor"`,
   );
   const posted: Books['posted'] = await tx.query(
     `select substr(idem_key, 5) as "transactionId", created_at as at from ledger_transfers
@@ -85,7 +85,7 @@ export async function readBooks(tx: EntityManager, days: number): Promise<Books>
     [days],
   );
   const accounts: Books['accounts'] = await tx.query(
-    `select code, case normal when 'D' then 'debit' else 'credit' end as side, balance::int as "balanceMinor"
+    `select code, case normal when 'D' then 'debit' else 'credit' end as side, balance::float8 as "balanceMinor"
        from ledger_accounts where balance <> 0 order by code limit 500`,
   );
   return { ...sums!, posted, accounts };

@@ -73,7 +73,7 @@ async function accountIdOf(tx: EntityManager, code: string, currency: string): P
 
 async function assertSameAsBefore(tx: EntityManager, key: string, entries: LedgerEntry[]): Promise<void> {
   const before: LedgerEntry[] = await tx.query(
-    `select a.code as account, e.amount::int as "amountMinor" from ledger_entries e
+    `select a.code as account, e.amount::float8 as "amountMinor" from ledger_entries e
        join ledger_accounts a on a.id = e.account_id join ledger_transfers t on t.id = e.transfer_id
       where t.idem_key = $1 order by e.id`,
     [key],

@@ -3,6 +3,7 @@ import fc from 'fast-check';
 import { afterAll, beforeAll, expect, test } from 'vitest';
 import { openMarket, type Market } from '../../../test/market.ts';
 import { sqlState } from '../../platform/transaction.ts';
+import { readBooks } from './book-checks.queries.ts';
 import { postTransfer, type LedgerEntry } from './ledger.commands.ts';
 import { balanceOf } from './ledger.reads.ts';
 
@@ -41,6 +42,17 @@ test('posts a fact once: the same key again changes nothing, with other amounts 
   await expect(post([entry('asset.processor', 1), entry('hold.deal:D-1', -1)], 'once')).rejects.toThrow(
     'posted already',
   );
+});
+
+test('balances grow past what one amount may be', async () => {
+  const before = await balanceOf(market.db.manager, 'asset.bank');
+  const key = randomUUID();
+  const large = [entry('asset.bank', 5_000_000_000), entry('asset.processor', -5_000_000_000)];
+  await post(large, key);
+  expect(await post(large, key)).toBe(false);
+  expect((await balanceOf(market.db.manager, 'asset.bank')) - before).toBe(5_000_000_000);
+  const { accounts } = await readBooks(market.db.manager, 1);
+  expect(accounts.find(({ code }) => code === 'asset.bank')?.balanceMinor).toBe(before + 5_000_000_000);
 });
 
 test('twenty at once with the same key are one', async () => {

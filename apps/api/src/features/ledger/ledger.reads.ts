@@ -18,7 +18,7 @@ export const accountCode = {
 /** An account's balance in minor units, in its own sense (debit accounts grow by debits); 0 for one not used yet. */
 export async function balanceOf(tx: EntityManager, code: string): Promise<number> {
   const rows: { balance: number }[] = await tx.query(
-    'select balance::int as balance from ledger_accounts where code = $1',
+    'select balance::float8 as balance from ledger_accounts where code = $1',
     [code],
   );
   return rows[0]?.balance ?? 0;

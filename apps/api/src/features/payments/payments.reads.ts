@@ -43,7 +43,7 @@ export async function moneyOnItsWay(
 /** What waits or is under way for a seller, in minor units. */
 export async function waitingMinor(tx: EntityManager, memberId: string): Promise<number> {
   const rows: { minor: number }[] = await tx.query(
-    `select coalesce(sum(amount_minor), 0)::int as minor from transfers where member_id = $1 and state in ('waiting', 'queued')`,
+    `select coalesce(sum(amount_minor), 0)::float8 as minor from transfers where member_id = $1 and state in ('waiting', 'queued')`,
     [memberId],
   );
   return rows[0]!.minor;
