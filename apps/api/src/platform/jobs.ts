@@ -41,6 +41,26 @@ const recurring: Partial<Record<JobName, string>> = {
   'ledger.check': '12 3 * * *',
 };
 
+interface Batch {
+  handler: JobHandler;
+  objectIds: readonly string[];
+  onError: (error: unknown, objectId: string) => void;
+}
+
+/**
+ * Runs jobs one after the other; one that fails keeps no other from running.
+ * @throws Error when any failed, so that the queue rings for all of them again
+ */
+export async function runBatch({ handler, objectIds, onError }: Batch): Promise<void> {
+  let failed = 0;
+  for (const objectId of objectIds)
+    await handler(objectId).catch((error: unknown) => {
+      failed += 1;
+      onError(error, objectId);
+    });
+  if (failed > 0) throw new Error(`${failed} of ${objectIds.length} jobs failed`);
+}
+
 export async function startJobs({ url, log, handlers }: { url: string; log: Log; handlers: JobHandlers }) {
   const boss = new PgBoss({ connectionString: url, schema: 'pgboss', max: 4, application_name: 'lydite-jobs' });
   boss.on('error', (error) => log.error({ err: error }, 'job queue'));
@@ -55,9 +75,14 @@ export async function startJobs({ url, log, handlers }: { url: string; log: Log;
       retryBackoff: true,
       expireInSeconds: 300,
     });
-    await boss.work<{ objectId?: string }>(name, { pollingIntervalSeconds: 1 }, async (jobs) => {
-      for (const job of jobs) await handlers[name](job.data?.objectId ?? '');
-    });
+    // The queue is asked once a second, and at 18:00 many deadlines end at once.
+    await boss.work<{ objectId?: string }>(name, { pollingIntervalSeconds: 1, batchSize: 50 }, (jobs) =>
+      runBatch({
+        handler: handlers[name],
+        objectIds: jobs.map((job) => job.data?.objectId ?? ''),
+        onError: (error, objectId) => log.error({ err: error, job: name, objectId }, 'a job failed'),
+      }),
+    );
     const cron = recurring[name];
     if (cron) await boss.schedule(name, cron);
   }

@@ -31,7 +31,8 @@ export type OutboxHandler = (item: ClaimedItem) => Promise<void>;
 export class HopelessEffect extends Error {}
 
 const leaseSeconds = 120;
-const mostAttempts = 25;
+/** About a week: money that is owed outlasts a long weekend's outage. */
+const mostAttempts = 350;
 
 /** 2 s, 4 s, 8 s … at most half an hour. */
 const backoffSeconds = (attempts: number): number => Math.min(1800, 2 ** Math.min(attempts, 11));

@@ -11,6 +11,11 @@ export function readInput(schema: z.ZodType | undefined, value: unknown, part: '
     if (empty || part === 'path') return undefined;
     throw new AppError('request.invalid', `This call takes no ${part}.`);
   }
+  const bad = unkeepableIn(value);
+  if (bad !== null)
+    throw new AppError('request.invalid', `${bad || part}: ${unkeepable}`, {
+      fields: [{ path: bad, message: unkeepable }],
+    });
   const parsed = schema.safeParse(isEmptyBody(part, value) ? undefined : value);
   if (parsed.success) return parsed.data;
   const fields = parsed.error.issues.flatMap((issue) =>
@@ -24,6 +29,19 @@ export function readInput(schema: z.ZodType | undefined, value: unknown, part: '
   throw new AppError('request.invalid', fields.map((field) => `${field.path || part}: ${field.message}`).join(' '), {
     fields,
   });
+}
+
+const unkeepable = 'Leave out characters that are no text: NUL, or half of a pair.';
+
+/** Path of the first text that the database could not keep, or null: NUL and halves of surrogate pairs are no characters to it. */
+function unkeepableIn(value: unknown): string | null {
+  if (typeof value === 'string') return value.includes('\0') || /\p{Surrogate}/u.test(value) ? '' : null;
+  if (typeof value !== 'object' || value === null) return null;
+  for (const [key, one] of Object.entries(value)) {
+    const inner = unkeepableIn(one);
+    if (inner !== null) return inner ? `${key}.${inner}` : key;
+  }
+  return null;
 }
 
 /** A client may send `{}` where nothing is expected. */
