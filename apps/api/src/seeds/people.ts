@@ -85,8 +85,8 @@ export const firms = {
     roles: ['assayer'],
     limit: 50_000,
   },
-  desk: { name: 'Market desk, Harrowmere', place: 'Harrowmere', mailbox: 'operator', roles: [] },
-  secondDesk: { name: 'Market desk, Vennaby', place: 'Vennaby', mailbox: 'operator-2', roles: [] },
+  desk: { name: 'Market desk, Harrowmere', place: 'Harrowmere', mailbox: 'operator', roles: [], limit: 2_000 },
+  secondDesk: { name: 'Market desk, Vennaby', place: 'Vennaby', mailbox: 'operator-2', roles: [], limit: 2_000 },
 } as const satisfies Record<string, Firm>;
 
 export type FirmKey = keyof typeof firms;

@@ -1,50 +1,26 @@
-import { mkdtemp, rm } from 'node:fs/promises';
-import { tmpdir } from 'node:os';
-import { join } from 'node:path';
-import { startPayments, startPrices, type Running } from '@lydite/fakes';
 import { catalogue20261 } from '@lydite/valuation';
-import type { DataSource } from 'typeorm';
 import { afterAll, beforeAll, expect, test } from 'vitest';
+import { openDemoMarket } from '../../test/demo-market.ts';
+import type { Market } from '../../test/market.ts';
 import { checkLedger } from '../features/ledger/ledger-check.ts';
 import { pollEvents } from '../features/payments/receive-event.ts';
-import { createOwnerSource } from '../data-source.ts';
-import { createProcessorGateway } from '../platform/processor-gateway.ts';
-import { createPriceSource } from '../platform/prices.ts';
 import type { World } from '../platform/world.ts';
-import { openMarket, type Market } from '../../test/market.ts';
 import { photoFiles } from './album.ts';
-import { demoPassword, firms } from './people.ts';
-import { seedMarket } from './seed-market.ts';
+import { demoPassword, firms, type signIns as printedSignIns } from './people.ts';
 
-const photosFolder = join(import.meta.dirname, 'photos');
-
-let dir: string;
-let payments: Running;
-let prices: Running;
+let demo: Awaited<ReturnType<typeof openDemoMarket>>;
 let market: Market;
-let owner: DataSource;
 let world: World;
-let signIns: Awaited<ReturnType<typeof seedMarket>>;
+let signIns: typeof printedSignIns;
+let begunAt: Date;
 
 beforeAll(async () => {
-  dir = await mkdtemp(join(tmpdir(), 'lydite-seed-'));
-  payments = await startPayments({ port: 0, dir, fundsDelayS: 1, payoutDelayS: 1 });
-  prices = await startPrices({ port: 0 });
-  market = await openMarket({
-    payments: createProcessorGateway,
-    env: { PAYMENTS_API_URL: `http://127.0.0.1:${payments.port}`, LIMITS: 'on' },
-  });
-  owner = await createOwnerSource(market.database.ownerUrl).initialize();
-  world = { ...market.world, prices: createPriceSource(`http://127.0.0.1:${prices.port}`) };
-  signIns = await seedMarket({ world, owner, photosFolder });
+  demo = await openDemoMarket();
+  ({ market, world } = demo);
+  begunAt = new Date();
+  signIns = await demo.seed();
 }, 120_000);
-
-afterAll(async () => {
-  await owner.destroy();
-  await market.close();
-  await Promise.all([payments.close(), prices.close()]);
-  await rm(dir, { recursive: true, force: true });
-});
+afterAll(() => demo.close());
 
 const counts = async (sql: string): Promise<Record<string, number>> => {
   const rows: { key: string; n: number }[] = await market.db.query(sql);
@@ -86,7 +62,8 @@ test('the market runs on real time again, and nothing in it lies in the future',
   const rows: { off: number; late: number; alarms: number }[] = await market.db.query(
     `select extract(epoch from market_now() - clock_timestamp())::int as off,
             (select count(*)::int from deal_events where at > clock_timestamp()) + (select count(*)::int from bids where placed_at > clock_timestamp()) as late,
-            (select count(*)::int from outbox where kind = 'alarm' and state = 'pending' and (payload->>'at')::timestamptz < clock_timestamp()) as alarms`,
+            (select count(*)::int from outbox where kind = 'alarm' and state = 'pending' and (payload->>'at')::timestamptz < $1) as alarms`,
+    [begunAt],
   );
   expect(rows).toEqual([{ off: 0, late: 0, alarms: 0 }]);
 });
@@ -189,6 +166,6 @@ test('names are a place of Wendlesea and a plain trade word', async () => {
 test('a second run is refused and changes nothing', async () => {
   const members = () => market.db.query('select count(*)::int as n from members');
   const before = await members();
-  await expect(seedMarket({ world, owner, photosFolder })).rejects.toThrow('members already');
+  await expect(demo.seed()).rejects.toThrow('members already');
   expect(await members()).toEqual(before);
 });

@@ -26,11 +26,11 @@ export function createStage(parts: StageParts) {
     deals: createDealsService(world),
     deliveries: createDeliveriesService(world),
     /** Carries out what was ordered outside, and takes in what came of it, until nothing is left. */
-    async work(): Promise<void> {
+    work: async (): Promise<void> => {
       while ((await inbox.runAll()) + (await runner.runAll()) > 0);
     },
     /** Asks the processor what has happened there; nothing of the market listens for its webhooks yet. */
-    async hear(): Promise<void> {
+    hear: async (): Promise<void> => {
       await runner.runAll();
       await pollEvents(world);
       await inbox.runAll();

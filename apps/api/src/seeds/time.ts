@@ -5,12 +5,12 @@ import type { DataSource } from 'typeorm';
 export interface Calendar {
   readonly now: DateTime;
   /** So many days ago at a time of day such as `9:40`. */
-  ago(days: number, time: string): DateTime;
-  hoursAgo(hours: number): DateTime;
+  ago: (days: number, time: string) => DateTime;
+  hoursAgo: (hours: number) => DateTime;
   /** The full hour that lies at least so many hours ahead; behind, for a negative number. */
-  fullHour(hours: number): DateTime;
+  fullHour: (hours: number) => DateTime;
   /** A full hour of the day, so many days ahead. */
-  ahead(days: number, hour: number): DateTime;
+  ahead: (days: number, hour: number) => DateTime;
 }
 
 export function createCalendar({ now, zone }: { now: Date; zone: string }): Calendar {

@@ -1,16 +1,5 @@
 import type { OpenLot } from '../stories/open-lots.ts';
-import {
-  about,
-  asking,
-  bidsFrom,
-  counted,
-  countedOnPhoto,
-  inspected,
-  line,
-  sentFor,
-  statedKg,
-  weighedKg,
-} from '../lot-plan.ts';
+import { about, asking, bidsFrom, counted, countedOnPhoto, inspected, line, sentFor, weighedKg } from '../lot-plan.ts';
 import type { Calendar } from '../time.ts';
 
 /** Processors and chip packages that are on the market now. */

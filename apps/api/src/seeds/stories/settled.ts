@@ -1,3 +1,4 @@
+import { randomUUID } from 'node:crypto';
 import {
   accept,
   acceptClaim,
@@ -28,17 +29,17 @@ export async function* settledInOrder(stage: Stage): Story {
   await bid(stage, lotCode, ['refining', 840]);
   yield closes.plus({ minutes: 10 });
   const deal = await dealOf(stage, lotCode);
-  yield closes.plus({ hours: 15 });
+  yield closes.plus({ hours: 15, minutes: 42 });
   await pay(stage, { buyer: 'recovery', deal });
-  yield closes.plus({ days: 1, hours: 21 });
+  yield closes.plus({ days: 1, hours: 21, minutes: 18 });
   await dispatch(stage, { by: 'repairs', deal }, 'WC 20 417');
-  yield closes.plus({ days: 4, hours: 16 });
+  yield closes.plus({ days: 4, hours: 16, minutes: 51 });
   await receive(stage, { by: 'recovery', deal });
-  yield closes.plus({ days: 4, hours: 18 });
+  yield closes.plus({ days: 4, hours: 18, minutes: 26 });
   await weighIn(stage, { by: 'recovery', deal }, { netKg: 15.09, tareKg: 1.24, resolutionG: 10, serial: 'B-204' });
-  yield closes.plus({ days: 5, hours: 15 });
+  yield closes.plus({ days: 5, hours: 15, minutes: 33 });
   await countersign(stage, { by: 'repairs', deal });
-  yield closes.plus({ days: 5, hours: 20 });
+  yield closes.plus({ days: 5, hours: 20, minutes: 4 });
   await accept(stage, { by: 'recovery', deal });
 }
 
@@ -51,16 +52,16 @@ export async function* settledBySilence(stage: Stage): Story {
     ['refining', 1080],
   ] as const;
   const deal = yield* sell(stage, { seller: 'clearance', plan: sold.officeBoards, closes, bids });
-  yield closes.plus({ hours: 17 });
+  yield closes.plus({ hours: 17, minutes: 38 });
   // The first card is declined, the second is good.
   await pay(stage, { buyer: 'reclaim', deal, method: 'pm_card_chargeDeclinedInsufficientFunds' });
-  yield closes.plus({ hours: 18 });
+  yield closes.plus({ hours: 18, minutes: 13 });
   await pay(stage, { buyer: 'reclaim', deal });
-  yield closes.plus({ days: 1, hours: 16 });
+  yield closes.plus({ days: 1, hours: 16, minutes: 56 });
   await dispatch(stage, { by: 'clearance', deal }, 'WC 20 562');
-  yield closes.plus({ days: 3, hours: 17 });
+  yield closes.plus({ days: 3, hours: 17, minutes: 22 });
   await receive(stage, { by: 'reclaim', deal });
-  yield closes.plus({ days: 3, hours: 19 });
+  yield closes.plus({ days: 3, hours: 19, minutes: 47 });
   await weighIn(stage, { by: 'reclaim', deal }, { netKg: 64.3, tareKg: 18.5, resolutionG: 100, serial: 'F-11' });
 }
 
@@ -73,19 +74,19 @@ export async function* settledAfterClaim(stage: Stage): Story {
     ['trading', 480],
   ] as const;
   const deal = yield* sell(stage, { seller: 'dismantling', plan: sold.keypadPhones, closes, bids });
-  yield closes.plus({ hours: 4 });
+  yield closes.plus({ hours: 4, minutes: 9 });
   await pay(stage, { buyer: 'recovery', deal });
-  yield closes.plus({ days: 2, hours: 17 });
+  yield closes.plus({ days: 2, hours: 17, minutes: 31 });
   await dispatch(stage, { by: 'dismantling', deal }, 'WC 20 688');
-  yield closes.plus({ days: 5, hours: 18 });
+  yield closes.plus({ days: 5, hours: 18, minutes: 7 });
   await receive(stage, { by: 'recovery', deal });
-  yield closes.plus({ days: 5, hours: 20 });
+  yield closes.plus({ days: 5, hours: 20, minutes: 42 });
   const note = 'Dry, without the bag. A second weighing gave the same.';
   const scale = { netKg: 11.86, tareKg: 0.62, resolutionG: 10, serial: 'B-204', note };
   await weighIn(stage, { by: 'recovery', deal }, scale);
-  yield closes.plus({ days: 5, hours: 21 });
+  yield closes.plus({ days: 5, hours: 21, minutes: 18 });
   await claimMass(stage, { by: 'recovery', deal });
-  yield closes.plus({ days: 6, hours: 19 });
+  yield closes.plus({ days: 6, hours: 19, minutes: 51 });
   await acceptClaim(stage, { by: 'dismantling', deal });
 }
 
@@ -97,17 +98,17 @@ export async function* settledWithoutPapers(stage: Stage): Story {
     ['trading', 470],
   ] as const;
   const deal = yield* sell(stage, { seller: 'salvage', plan: sold.pinStrips, closes, bids });
-  yield closes.plus({ hours: 14 });
+  yield closes.plus({ hours: 14, minutes: 26 });
   await pay(stage, { buyer: 'trading', deal });
-  yield closes.plus({ days: 1, hours: 15 });
+  yield closes.plus({ days: 1, hours: 15, minutes: 33 });
   await dispatch(stage, { by: 'salvage', deal }, 'WC 20 905');
-  yield closes.plus({ days: 3, hours: 15 });
+  yield closes.plus({ days: 3, hours: 15, minutes: 4 });
   await receive(stage, { by: 'trading', deal });
-  yield closes.plus({ days: 3, hours: 16 });
+  yield closes.plus({ days: 3, hours: 16, minutes: 38 });
   await weighIn(stage, { by: 'trading', deal }, { netKg: 4.803, tareKg: 0.41, resolutionG: 1, serial: 'P-7' });
-  yield closes.plus({ days: 3, hours: 20 });
+  yield closes.plus({ days: 3, hours: 20, minutes: 13 });
   await countersign(stage, { by: 'salvage', deal });
-  yield closes.plus({ days: 4, hours: 14 });
+  yield closes.plus({ days: 4, hours: 14, minutes: 56 });
   await accept(stage, { by: 'trading', deal });
 }
 
@@ -117,21 +118,21 @@ export async function* settledByCollection(stage: Stage): Story {
   const listed = stage.calendar.ago(20, '09:15');
   yield listed;
   const lotCode = await list(stage, 'disposal', plan);
-  yield listed.plus({ days: 1, hours: 5 });
+  yield listed.plus({ days: 1, hours: 5, minutes: 22 });
   const priceMinor = plan.sale.askingMinor!;
   const buyerId = stage.people.refining.id;
-  await stage.bids.take({ lotCode, buyerId, priceMinor, attempt: crypto.randomUUID() });
+  await stage.bids.take({ lotCode, buyerId, priceMinor, attempt: randomUUID() });
   const deal = await dealOf(stage, lotCode);
-  yield listed.plus({ days: 1, hours: 6 });
+  yield listed.plus({ days: 1, hours: 6, minutes: 47 });
   await pay(stage, { buyer: 'refining', deal });
-  yield listed.plus({ days: 2, hours: 2 });
+  yield listed.plus({ days: 2, hours: 2, minutes: 9 });
   await makeReady(stage, { by: 'disposal', deal });
-  yield listed.plus({ days: 5, hours: 3 });
+  yield listed.plus({ days: 5, hours: 3, minutes: 31 });
   await receive(stage, { by: 'refining', deal });
-  yield listed.plus({ days: 5, hours: 6 });
+  yield listed.plus({ days: 5, hours: 6, minutes: 7 });
   await weighIn(stage, { by: 'refining', deal }, { netKg: 9.21, tareKg: 0.9, resolutionG: 10, serial: 'U-31' });
-  yield listed.plus({ days: 6 });
+  yield listed.plus({ days: 6, minutes: 42 });
   await countersign(stage, { by: 'disposal', deal });
-  yield listed.plus({ days: 6, hours: 4 });
+  yield listed.plus({ days: 6, hours: 4, minutes: 18 });
   await accept(stage, { by: 'refining', deal });
 }

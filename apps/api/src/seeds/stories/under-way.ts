@@ -22,7 +22,7 @@ export async function* held(stage: Stage): Story {
     ['refining', 290],
   ] as const;
   const deal = yield* sell(stage, { seller: 'repairs', plan: sold.notebookMemory, closes, bids });
-  yield closes.plus({ hours: 4 });
+  yield closes.plus({ hours: 4, minutes: 51 });
   await pay(stage, { buyer: 'refining', deal });
 }
 
@@ -33,9 +33,9 @@ export async function* dispatched(stage: Stage): Story {
     ['recovery', 980],
   ] as const;
   const deal = yield* sell(stage, { seller: 'disposal', plan: sold.bladeBoards, closes, bids });
-  yield closes.plus({ hours: 3 });
+  yield closes.plus({ hours: 3, minutes: 26 });
   await pay(stage, { buyer: 'recovery', deal });
-  yield closes.plus({ days: 2, hours: 2 });
+  yield closes.plus({ days: 2, hours: 2, minutes: 33 });
   await dispatch(stage, { by: 'disposal', deal }, 'WC 21 340');
 }
 
@@ -46,9 +46,9 @@ export async function* readyForCollection(stage: Stage): Story {
     ['reclaim', 2300],
   ] as const;
   const deal = yield* sell(stage, { seller: 'clearance', plan: sold.schoolBoards, closes, bids });
-  yield closes.plus({ hours: 6 });
+  yield closes.plus({ hours: 6, minutes: 4 });
   await pay(stage, { buyer: 'reclaim', deal });
-  yield closes.plus({ days: 1, hours: 3 });
+  yield closes.plus({ days: 1, hours: 3, minutes: 38 });
   await makeReady(stage, { by: 'clearance', deal });
 }
 
@@ -59,11 +59,11 @@ export async function* received(stage: Stage): Story {
     ['recovery', 260],
   ] as const;
   const deal = yield* sell(stage, { seller: 'dismantling', plan: sold.graphicsCards, closes, bids });
-  yield closes.plus({ hours: 8 });
+  yield closes.plus({ hours: 8, minutes: 13 });
   await pay(stage, { buyer: 'recovery', deal });
-  yield closes.plus({ days: 2 });
+  yield closes.plus({ days: 2, minutes: 56 });
   await dispatch(stage, { by: 'dismantling', deal }, 'WC 21 202');
-  yield closes.plus({ days: 5, hours: 3 });
+  yield closes.plus({ days: 5, hours: 3, minutes: 22 });
   await receive(stage, { by: 'recovery', deal });
 }
 
@@ -74,13 +74,13 @@ export async function* weighedIn(stage: Stage): Story {
     ['works', 340],
   ] as const;
   const deal = yield* sell(stage, { seller: 'repairs', plan: sold.benchContacts, closes, bids });
-  yield closes.plus({ hours: 2 });
+  yield closes.plus({ hours: 2, minutes: 47 });
   await pay(stage, { buyer: 'works', deal });
-  yield closes.plus({ days: 1, hours: 4 });
+  yield closes.plus({ days: 1, hours: 4, minutes: 9 });
   await dispatch(stage, { by: 'repairs', deal }, 'WC 21 155');
-  yield closes.plus({ days: 5, hours: 20 });
+  yield closes.plus({ days: 5, hours: 20, minutes: 31 });
   await receive(stage, { by: 'works', deal });
-  yield closes.plus({ days: 6, hours: 14 });
+  yield closes.plus({ days: 6, hours: 14, minutes: 7 });
   await weighIn(stage, { by: 'works', deal }, { netKg: 1.598, tareKg: 0.105, resolutionG: 1, serial: 'O-3' });
 }
 
@@ -93,15 +93,15 @@ export async function* inDispute(stage: Stage): Story {
     ['recovery', 430],
   ] as const;
   const deal = yield* sell(stage, { seller: 'repairs', plan: sold.notebookBoards, closes, bids });
-  yield closes.plus({ hours: 5 });
+  yield closes.plus({ hours: 5, minutes: 42 });
   await pay(stage, { buyer: 'refining', deal });
-  yield closes.plus({ days: 1, hours: 2 });
+  yield closes.plus({ days: 1, hours: 2, minutes: 18 });
   await dispatch(stage, { by: 'repairs', deal }, 'WC 21 098');
-  yield closes.plus({ days: 6 });
+  yield closes.plus({ days: 6, minutes: 51 });
   await receive(stage, { by: 'refining', deal });
-  yield closes.plus({ days: 6, hours: 20 });
+  yield closes.plus({ days: 6, hours: 20, minutes: 26 });
   const note = 'One bag was torn. We weighed what arrived twice, with the same result.';
   await weighIn(stage, { by: 'refining', deal }, { netKg: 20.6, tareKg: 2.2, resolutionG: 100, serial: 'U-12', note });
-  yield closes.plus({ days: 7, hours: 4 });
+  yield closes.plus({ days: 7, hours: 4, minutes: 33 });
   await claimMass(stage, { by: 'refining', deal });
 }

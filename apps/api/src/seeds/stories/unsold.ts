@@ -21,7 +21,7 @@ export async function* belowReserve(stage: Stage): Story {
   await bid(stage, lotCode, ['works', 180]);
   yield second!;
   await bid(stage, lotCode, ['reclaim', 210]);
-  yield closes.plus({ days: 3 });
+  yield closes.plus({ days: 3, minutes: 4 });
   await copyLot(stage.world, { lotCode, sellerId: stage.people.repairs.id });
 }
 
@@ -53,7 +53,7 @@ export async function* offeredToUnderBidder(stage: Stage): Story {
     ['trading', 420],
   ] as const;
   const deal = yield* sell(stage, { seller: 'dismantling', plan: sold.consoleCrate, closes, bids });
-  const debited = closes.plus({ hours: 5 });
+  const debited = closes.plus({ hours: 5, minutes: 38 });
   yield debited;
   await pay(stage, { buyer: 'trading', deal, method: 'pm_usBankAccount_success' });
   yield debited.plus(missed.toMillis() - deal.dueAt.getTime());
