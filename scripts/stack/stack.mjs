@@ -9,7 +9,7 @@ import { ensureWebhooks } from '../lib/webhooks.mjs';
 import { isRunning, openCluster, startCluster, stopCluster } from '../postgres/cluster.mjs';
 import { databaseUrls } from '../postgres/database.mjs';
 import * as environments from './environment.mjs';
-import { openMarket, seedOnce } from './market.mjs';
+import { demoSignIns, openMarket, seedOnce } from './market.mjs';
 import { choosePorts } from './ports.mjs';
 import { programsOf } from './programs.mjs';
 
@@ -100,7 +100,10 @@ export class Stack {
 
   /** Starts the API and the worker and waits until the API says it is ready. */
   async startApi() {
-    this.start({ name: 'api', ...this.programs.api, env: this.#environment });
+    // The seed has told who can sign in; the market shows roles and addresses, never the password.
+    const signIns = demoSignIns(this.dir).map(({ role, email }) => ({ role, email }));
+    const env = { ...this.#environment, DEMO_SIGN_INS: JSON.stringify(signIns) };
+    this.start({ name: 'api', ...this.programs.api, env });
     this.start({ name: 'worker', ...this.programs.worker, env: this.#environment });
     await waitForAnswer({ url: `http://127.0.0.1:${this.ports.api}/readyz`, services: this.services });
   }
