@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { amountMinor, isoTime, pageNumber, page, role } from './common.ts';
+import { amountMinor, dealCode, isoTime, nothing, pageNumber, page, role } from './common.ts';
 import { endpoints } from './endpoint.ts';
 
 const query = z.strictObject({ page: pageNumber, q: z.string().trim().max(80).optional() });
@@ -108,6 +108,15 @@ export const deskEndpoints = endpoints({
   },
   'GET /desk/lots': { summary: 'All lots', access: operator, query, response: page(deskLot) },
   'GET /desk/deals': { summary: 'All deals', access: operator, query, response: page(deskDeal) },
+  'POST /desk/deals/:dealCode/approve': {
+    summary: 'Approve a large settlement that waits for it',
+    access: operator,
+    fresh: true,
+    params: z.object({ dealCode }),
+    body: nothing,
+    response: 'none',
+    status: 204,
+  },
   'GET /desk/outbox': { summary: 'Outside effects, newest first', access: operator, query, response: page(outboxRow) },
   'GET /desk/jobs': { summary: 'Job queues', access: operator, response: z.array(jobRow) },
   'GET /desk/ledger': { summary: 'The ledger check, run now', access: operator, response: ledgerReport },

@@ -78,6 +78,7 @@ const rowOf: Record<Route, string> = {
   'POST /desk/members/:memberId/verify': 'member',
   'GET /desk/lots': 'lot draft',
   'GET /desk/deals': 'deal, timeline',
+  'POST /desk/deals/:dealCode/approve': 'settlement',
   'GET /desk/outbox': 'outbox',
   'GET /desk/jobs': 'outbox',
   'GET /desk/ledger': 'outbox',

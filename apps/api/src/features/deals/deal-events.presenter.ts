@@ -51,6 +51,7 @@ const told: Record<EventKind, [title: string, tell: Tell]> = {
   decided: ['Ready to settle', ({ why }) => String(why)],
   approval_due: ['Awaits approval', say('Settlements of this size wait for an operator')],
   approval_missed: ['Not approved in time', say('All operators are told')],
+  approve: ['Settlement approved', nothing],
   settle: [
     'Settled',
     (detail, { money }) => {

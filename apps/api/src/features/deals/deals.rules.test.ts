@@ -56,7 +56,7 @@ describe('the table of states', () => {
       'settling –approval_due, market→ needs_approval',
       'settling –settle, market→ settled',
       'needs_approval –approval_missed, market→ needs_approval',
-      'needs_approval –settle, market→ settled',
+      'needs_approval –approve, desk→ settling',
     ]);
   });
 

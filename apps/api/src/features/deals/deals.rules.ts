@@ -31,7 +31,8 @@ export const dealMoves = {
   decided: { by: 'market', from: { weighed_in: 'settling' } },
   approval_due: { by: 'market', from: { settling: 'needs_approval' } },
   approval_missed: { by: 'market', from: { needs_approval: 'needs_approval' } },
-  settle: { by: 'market', from: { settling: 'settled', needs_approval: 'settled' } },
+  approve: { by: 'desk', from: { needs_approval: 'settling' } },
+  settle: { by: 'market', from: { settling: 'settled' } },
 } as const satisfies Record<string, Move>;
 export type DealMove = keyof typeof dealMoves;
 

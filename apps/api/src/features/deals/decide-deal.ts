@@ -6,10 +6,10 @@ import { inTransaction } from '../../platform/transaction.ts';
 import { createWords, massWords } from '../../platform/words.ts';
 import type { World } from '../../platform/world.ts';
 import { recordCountersign } from '../deliveries/deliveries.commands.ts';
-import { netOf } from '../deliveries/deliveries.reads.ts';
 import { notify } from '../notices/notices.commands.ts';
 import { returnHold } from '../payments/payments.commands.ts';
 import { settleDeal } from '../settlements/settlements.commands.ts';
+import { acceptedClaim } from './claim-terms.ts';
 import { dueAfter, lockOwnDeal, moveDeal, type LockedDeal } from './deal-steps.commands.ts';
 import { isDispatchLate } from './deal-view.presenter.ts';
 import { Claim } from './deal.entity.ts';
@@ -119,13 +119,7 @@ export const acceptClaim = (world: Pick<World, 'db'>, step: OwnStep): Promise<De
       due: null,
       detail: { adjustmentMinor: claim.adjustmentMinor },
     });
-    const { money } = createWords(await marketTerms(tx));
-    const shortG = netOf({ grossG: claim.declaredG, tareG: claim.foundG });
-    await settleDeal(tx, deal, {
-      adjustmentMinor: claim.adjustmentMinor,
-      reason: `Mass: ${money(deal.priceMinor)} × ${massWords(shortG)} short ÷ ${massWords(claim.declaredG)} declared`,
-      now,
-    });
+    await settleDeal(tx, deal, { ...(await acceptedClaim(tx, deal)), now });
   });
 
 /** The buyer cancels because dispatch is late: all of the hold goes back, without fees. */

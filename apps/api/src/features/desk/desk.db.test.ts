@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, expect, test } from 'vitest';
+import { addDeal, bringToReceipt, must, weighIn } from '../../../test/deals.ts';
 import { addMember } from '../../../test/factories.ts';
 import { openMarket, type Caller, type Market } from '../../../test/market.ts';
 import { addOpenLot } from '../../../test/open-lot.ts';
@@ -74,6 +75,38 @@ test('lots and deals are listed without reserves and ceilings; a search text is 
   expect(late.body.rows[0]!.dueWhat).toBe('Dispatch, late');
   for (const q of ['%', '_', `' or 1=1--`])
     expect((await operator.call('GET /desk/deals', { query: { q } })).body.total).toBe(0);
+});
+
+test('a settlement above 20 000.00 waits for an operator who is no side of it, and settles when approved, with its claim', async () => {
+  const deal = await addDeal(market, { priceMinor: 3_000_000 });
+  const params = { dealCode: deal.code };
+  const approve = (by: Caller) => by.call('POST /desk/deals/:dealCode/approve', { params });
+  await bringToReceipt(market, deal);
+  await must(weighIn(deal, 11_160));
+  expect((await approve(operator)).problem.code).toBe('deal.wrong_state');
+  await must((await deal.buyer()).call('POST /deals/:dealCode/claim', { params, body: { ground: 'mass' } }));
+  const waiting = await must((await deal.seller()).call('POST /deals/:dealCode/accept-claim', { params }));
+  expect(waiting.body.state).toBe('needs_approval');
+
+  await market.db.query(`insert into member_roles (member_id, role) values ($1, 'operator')`, [deal.sellerId]);
+  expect((await approve(await deal.seller())).problem.code).toBe('member.role_missing');
+  await market.db.query('update deals set frozen_at = market_now() where id = $1', [deal.id]);
+  expect((await approve(operator)).problem.code).toBe('deal.frozen');
+  await market.db.query('update deals set frozen_at = null where id = $1', [deal.id]);
+
+  const answers = await Promise.all([approve(operator), approve(operator)]);
+  expect(answers.map(({ status }) => status).toSorted()).toEqual([204, 409]);
+  const settled = await must((await deal.buyer()).call('GET /deals/:dealCode', { params }));
+  expect(settled.body).toMatchObject({ state: 'settled', settlement: { valueMinor: 2_700_000, refundMinor: 306_000 } });
+  expect(settled.body.events.slice(-3).map(({ title, by }) => [title, by])).toEqual([
+    ['Awaits approval', 'The market'],
+    ['Settlement approved', 'The market’s desk'],
+    ['Settled', 'The market'],
+  ]);
+  const log = await market.db.query(`select actor_id from audit_log where action = 'deal.approve' and object_id = $1`, [
+    deal.code,
+  ]);
+  expect(log).toEqual([{ actor_id: operator.memberId }]);
 });
 
 test('the outbox shows what is still to do; no queue is shown before a worker ran', async () => {

@@ -1,5 +1,6 @@
 import type { Actor } from '../../platform/actor.ts';
 import type { World } from '../../platform/world.ts';
+import { approveDeal } from './approve-deal.ts';
 import { dealsPage } from './deals.queries.ts';
 import { lotsPage } from './lots.queries.ts';
 import { membersPage } from './members.queries.ts';
@@ -14,6 +15,7 @@ export const createDeskService = (world: Pick<World, 'db'>) => {
     verify: (actor: Actor, order: Parameters<typeof verifyMember>[2]) => verifyMember(world, actor, order),
     lots: (query: DeskQuery) => lotsPage(manager, query),
     deals: (query: DeskQuery) => dealsPage(manager, query),
+    approve: (actor: Actor, dealCode: string) => approveDeal(world, actor, dealCode),
     outbox: (query: DeskQuery) => outboxPage(manager, query),
     jobs: () => jobQueues(manager),
   };
