@@ -24,7 +24,7 @@ export function Component() {
     <Page shape="narrow">
       <h1>{title}</h1>
       <LotLine lot={lot} />
-      {offer || answer.isPending ? (
+      {offer || answer.isPending || answer.isSuccess ? (
         offer && <OfferCheck lot={lot} offer={offer} answer={answer} />
       ) : (
         <div className="mt-6">

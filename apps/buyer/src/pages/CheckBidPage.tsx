@@ -1,6 +1,6 @@
 import { catalogueQuery, isApiError, useWords } from '@lydite/client';
 import type { LotView } from '@lydite/contracts';
-import { buttonClass, FactList, formatAbout, Notice, Page } from '@lydite/ui';
+import { buttonClass, FactList, Notice, Page } from '@lydite/ui';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { Link, useParams, useSearchParams } from 'react-router-dom';
 import { bidProblem, boundsOf } from '../features/bids/bid-problem.ts';
@@ -14,6 +14,7 @@ import { ClosingIn } from '../lib/Closing.tsx';
 import { HoldWords } from '../lib/HoldWords.tsx';
 import { LotLine } from '../lib/LotLine.tsx';
 import { mostParam, readMost } from '../lib/most-param.ts';
+import { ReadingWords } from '../lib/worth/ReadingWords.tsx';
 import { useLotWorth } from '../lib/worth/use-lot-worth.ts';
 
 /** A bid on a page of its own: what it may cost and when it binds, before it does. */
@@ -83,11 +84,10 @@ function BidCheck({ lot, amountMinor, place }: BidCheckProps) {
 }
 
 function BidFacts({ lot, amountMinor }: { lot: LotView; amountMinor: number }) {
-  const { money, moment, currency } = useWords();
+  const { money, moment } = useWords();
   const { data: terms } = useSuspenseQuery(termsQuery);
   const { data: catalogue } = useSuspenseQuery(catalogueQuery(lot.estimate.catalogueVersion));
   const reading = useLotWorth({ lot, catalogue, terms })?.read(amountMinor);
-  const about = (minor: number) => formatAbout(minor, currency, { signed: true });
   return (
     <div className="ruled-head mt-6">
       <FactList
@@ -119,22 +119,7 @@ function BidFacts({ lot, amountMinor }: { lot: LotView; amountMinor: number }) {
               </>
             ),
           },
-          ...(reading
-            ? [
-                {
-                  name: 'At this amount',
-                  value: (
-                    <>
-                      You come out ahead in{' '}
-                      <b>
-                        {reading.ahead} of {reading.of}
-                      </b>{' '}
-                      results. 1 in 10 leaves you <b className="nowrap">{about(reading.worseMinor)}</b> or less
-                    </>
-                  ),
-                },
-              ]
-            : []),
+          ...(reading ? [{ name: 'At this amount', value: <ReadingWords reading={reading} /> }] : []),
         ]}
       />
     </div>

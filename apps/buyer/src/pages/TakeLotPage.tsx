@@ -1,6 +1,6 @@
 import { catalogueQuery, isApiError, useWords } from '@lydite/client';
 import type { LotView } from '@lydite/contracts';
-import { buttonClass, FactList, formatAbout, Notice, Page } from '@lydite/ui';
+import { buttonClass, FactList, Notice, Page } from '@lydite/ui';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { Link, useNavigate, useParams } from 'react-router-dom';
 import { useTakeLot } from '../features/bids/bids.queries.ts';
@@ -10,6 +10,7 @@ import { lotQuery } from '../features/lots/lots.queries.ts';
 import { termsQuery } from '../features/terms/terms.queries.ts';
 import { HoldWords } from '../lib/HoldWords.tsx';
 import { LotLine } from '../lib/LotLine.tsx';
+import { ReadingWords } from '../lib/worth/ReadingWords.tsx';
 import { useLotWorth } from '../lib/worth/use-lot-worth.ts';
 
 const title = 'Check before you take it';
@@ -71,7 +72,6 @@ function TakeCheck({ lot }: { lot: LotView }) {
 }
 
 function TakeFacts({ lot, priceMinor }: { lot: LotView; priceMinor: number }) {
-  const { currency } = useWords();
   const { data: terms } = useSuspenseQuery(termsQuery);
   const { data: catalogue } = useSuspenseQuery(catalogueQuery(lot.estimate.catalogueVersion));
   const reading = useLotWorth({ lot, catalogue, terms })?.read(priceMinor);
@@ -88,23 +88,7 @@ function TakeFacts({ lot, priceMinor }: { lot: LotView; priceMinor: number }) {
       name: 'When it binds',
       value: 'With the button below: the lot is yours and you owe its price. It is not taken back',
     },
-    ...(reading
-      ? [
-          {
-            name: 'At this price',
-            value: (
-              <>
-                You come out ahead in{' '}
-                <b>
-                  {reading.ahead} of {reading.of}
-                </b>{' '}
-                results. 1 in 10 leaves you{' '}
-                <b className="nowrap">{formatAbout(reading.worseMinor, currency, { signed: true })}</b> or worse
-              </>
-            ),
-          },
-        ]
-      : []),
+    ...(reading ? [{ name: 'At this price', value: <ReadingWords reading={reading} /> }] : []),
   ];
   return (
     <div className="ruled-head mt-6">
