@@ -20,4 +20,6 @@ export const toBuyerTerms = (own: BuyingTerms, { buyerFeeBp, freightMinor }: Cha
   winnersCurse: own.curseOn,
   buyerFeeShare: buyerFeeBp / 10_000,
   freightMinor,
+  // A lot bought outright is not assayed before it is paid.
+  assayCostMinor: 0,
 });

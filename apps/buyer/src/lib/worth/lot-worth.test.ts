@@ -62,8 +62,8 @@ describe('what a bid means', () => {
   });
 
   it('adds up the costs that come with the lot', () => {
-    // 86.4 kg at 2.50, the batch, the freight and an assay.
-    expect(worth.costsMinor).toBe(21_600 + 12_000 + 6_000 + 9_000);
+    // 86.4 kg at 2.50, the batch and the freight.
+    expect(worth.costsMinor).toBe(21_600 + 12_000 + 6_000);
   });
 
   it('is nothing where the process brings nothing out', () => {

@@ -69,9 +69,7 @@ export function lotWorth({ draws, beadsG, massG, terms, pricePerGMinor, currency
   return {
     money,
     safeBidMinor: value.highestSafeBidMinor,
-    costsMinor: Math.round(
-      (terms.processingPerKgMinor * massG) / 1000 + terms.batchCostMinor + terms.freightMinor + terms.assayCostMinor,
-    ),
+    costsMinor: Math.round((terms.processingPerKgMinor * massG) / 1000 + terms.batchCostMinor + terms.freightMinor),
     breakEvenG,
     read: (amountMinor) => {
       const profit = value.profitQuantilesMinor(amountMinor);

@@ -15,7 +15,7 @@ const reserveSentences: Record<LotView['reserve'], string> = {
   none: 'The seller set no lowest price above the start.',
 };
 
-/** The bidding so far: amounts the system bid, under aliases. What anybody would pay at most is in nobody's view. */
+/** The bidding so far, under aliases: what the lot stood at after each bid. What anybody would pay at most is in nobody's view. */
 export function BidsTable({ lot, children }: BidsTableProps) {
   const { zone, currency } = useMarket();
   const { shortMoment, money } = useWords();
@@ -37,15 +37,15 @@ export function BidsTable({ lot, children }: BidsTableProps) {
               <th scope="col">When, {zoneName}</th>
               <th scope="col">Buyer</th>
               <th scope="col" className="r">
-                Bid, {currency}
+                Price after it, {currency}
               </th>
             </tr>
           </thead>
           <tbody>
-            {lot.bids.map(({ alias, amountMinor, at, own }, i) => (
+            {lot.bids.map(({ alias, amountMinor, at }, i) => (
               <tr key={`${at} ${i}`}>
                 <td className="num">{shortMoment(at)}</td>
-                <td>{own ? `You, as ${alias}` : alias}</td>
+                <td>{alias}</td>
                 <td className="r">{money(amountMinor)}</td>
               </tr>
             ))}

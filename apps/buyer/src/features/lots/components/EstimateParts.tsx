@@ -1,10 +1,7 @@
 import type { LotView, PublicLine, StoredEstimate } from '@lydite/contracts';
 import { DoubtBar, formatNumber, NBSP, formatRange, formatShare, formatSignificant } from '@lydite/ui';
 import { evidenceWords } from '../line-words.ts';
-
-const mostDrivers = 3;
-/** A smaller share would hardly show in the range. */
-const leastShare = 0.03;
+import { worthwhileMeasurements } from '../measurements.ts';
 
 type Estimated = Pick<LotView, 'lines' | 'estimate' | 'massG' | 'pieces'>;
 
@@ -87,12 +84,12 @@ function TotalRow({ lot: { estimate, pieces } }: { lot: Estimated }) {
 
 /** What the doubt comes from, largest first, and what would answer it; then what looks odd. */
 function Narrowing({ estimate: { drivers, warnings } }: { estimate: StoredEstimate }) {
-  const worthwhile = drivers.filter(({ share }) => share >= leastShare).slice(0, mostDrivers);
+  const worthwhile = worthwhileMeasurements(drivers);
   if (worthwhile.length === 0 && warnings.length === 0) return null;
   return (
     <ul className="notes">
-      {worthwhile.map(({ lineId, classCode, parameter, share, question, nowG, afterG }) => (
-        <li key={`${lineId} ${classCode} ${parameter}`}>
+      {worthwhile.map(({ question, share, nowG, afterG }) => (
+        <li key={question}>
           {question}: {formatShare(share, 0)} of the doubt. The range would go from {formatRange(nowG)} to about{' '}
           {formatRange(afterG)}.
         </li>

@@ -6,7 +6,7 @@ import { defaultTerms } from '@lydite/valuation';
 export function AssumedTerms() {
   const { buyerFeeBp } = useMarket();
   const { money } = useWords();
-  const { priceHaircut, refiningPerGMinor, assayCostMinor, daysToCash, annualCostOfMoney } = defaultTerms;
+  const { priceHaircut, refiningPerGMinor, daysToCash, annualCostOfMoney } = defaultTerms;
   return (
     <section>
       <h2>Counted besides</h2>
@@ -20,7 +20,6 @@ export function AssumedTerms() {
             { name: 'Freight', value: 'as the lot states it' },
             { name: 'Refiner pays', value: `${formatShare(priceHaircut)} under the reference price` },
             { name: 'Refining', value: `${money(refiningPerGMinor)} for each gram paid` },
-            { name: 'Assay', value: `${money(assayCostMinor)} a lot` },
             { name: 'Cash after', value: `${daysToCash} days, at ${formatShare(annualCostOfMoney)} a year` },
           ]}
         />
