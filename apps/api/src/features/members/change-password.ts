@@ -3,7 +3,7 @@ import { AppError } from '../../platform/app-error.ts';
 import { audit } from '../../platform/audit.ts';
 import { inTransaction } from '../../platform/transaction.ts';
 import type { World } from '../../platform/world.ts';
-import { orderLink, spendToken } from './mail-tokens.ts';
+import { goodLinks, orderLink, spendOthers, spendToken } from './mail-tokens.ts';
 import { Member } from './member.entity.ts';
 import type { Passwords } from './passwords.ts';
 import { assertStrong } from './register.ts';
@@ -12,11 +12,15 @@ import { clearFailures } from './throttle.ts';
 
 type Parts = Pick<World, 'db' | 'settings' | 'sessions'> & { passwords: Passwords };
 
-/** Mails a reset link if the address is known; the answer is the same if not. */
+/** More would only fill a mailbox, perhaps a stranger's. */
+const mostGoodLinks = 5;
+
+/** Mails a reset link if the address is known and has not a few good ones already; the answer is the same if not. */
 export async function askForReset({ db, settings }: Parts, email: string): Promise<void> {
   await inTransaction(db, async (tx) => {
     const member = await tx.findOneBy(Member, { email: email.toLowerCase() });
-    if (member) await orderLink(tx, settings, { memberId: member.id, purpose: 'reset' });
+    if (member && (await goodLinks(tx, { memberId: member.id, purpose: 'reset' })) < mostGoodLinks)
+      await orderLink(tx, settings, { memberId: member.id, purpose: 'reset' });
   });
 }
 
@@ -37,6 +41,7 @@ export async function completeReset(
       'update members set password_hash = $2, email_confirmed_at = coalesce(email_confirmed_at, market_now()) where id = $1',
       [memberId, passwordHash],
     );
+    await spendOthers(tx, { memberId, purpose: 'reset' });
     await sessions.endAll(tx, memberId, { why: 'password reset' });
     await audit(tx, null, { action: 'member.password_reset', objectKind: 'member', objectId: memberId });
     return member.email;

@@ -41,6 +41,28 @@ export async function spendToken(
   return rows[0]?.member_id ?? null;
 }
 
+interface Links {
+  memberId: string;
+  purpose: Purpose;
+}
+
+/** How many unused links of this kind still work for the member. */
+export async function goodLinks(tx: EntityManager, { memberId, purpose }: Links): Promise<number> {
+  const rows: { n: number }[] = await tx.query(
+    `select count(*)::int as n from mail_tokens where member_id = $1 and purpose = $2 and used_at is null and expires_at > market_now()`,
+    [memberId, purpose],
+  );
+  return rows[0]!.n;
+}
+
+/** Makes every unused link of this kind worthless: one of them has done its work. */
+export async function spendOthers(tx: EntityManager, { memberId, purpose }: Links): Promise<void> {
+  await tx.query(
+    'update mail_tokens set used_at = market_now() where member_id = $1 and purpose = $2 and used_at is null',
+    [memberId, purpose],
+  );
+}
+
 const words: Record<Purpose, { subject: string; path: string; text: string }> = {
   confirm: {
     subject: 'Confirm your e-mail address',

@@ -1,7 +1,8 @@
-import { randomUUID } from 'node:crypto';
+import { createHash, randomUUID } from 'node:crypto';
 import type { RegisterRequest } from '@lydite/contracts';
 import { AppError } from '../../platform/app-error.ts';
 import { audit } from '../../platform/audit.ts';
+import { marketNow } from '../../platform/clock.ts';
 import { addToOutbox, type OutboxHandler } from '../../platform/outbox.ts';
 import { inTransaction, sqlState } from '../../platform/transaction.ts';
 import type { World } from '../../platform/world.ts';
@@ -33,9 +34,16 @@ export async function register({ db, settings, passwords }: Parts, request: Regi
     });
   } catch (error) {
     if (sqlState(error) !== '23505') throw error;
-    await inTransaction(db, (tx) =>
-      addToOutbox(tx, { kind: 'known-address.mail', key: `known-address:${id}`, payload: { email } }),
-    );
+    await inTransaction(db, async (tx) => {
+      // Once an hour at most: nobody's mailbox is filled from here.
+      const hour = (await marketNow(tx)).toISOString().slice(0, 13);
+      const address = createHash('sha256').update(email).digest('base64url');
+      await addToOutbox(tx, {
+        kind: 'known-address.mail',
+        key: `known-address:${address}:${hour}`,
+        payload: { email },
+      });
+    });
   }
 }
 

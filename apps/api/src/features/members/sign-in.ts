@@ -7,7 +7,7 @@ import type { World } from '../../platform/world.ts';
 import { orderLink } from './mail-tokens.ts';
 import { Member } from './member.entity.ts';
 import type { Passwords } from './passwords.ts';
-import { assertMayTry, clearFailures, noteFailure } from './throttle.ts';
+import { beginTry, clearFailures, noteFailure } from './throttle.ts';
 
 type Parts = Pick<World, 'db' | 'settings' | 'sessions'> & { passwords: Passwords };
 
@@ -18,17 +18,16 @@ export async function checkPassword(
   { db, passwords }: Pick<Parts, 'db' | 'passwords'>,
   { email, password, ip }: SignInRequest & { ip: string },
 ): Promise<Member> {
-  const attempt = { email, ip };
-  await assertMayTry(db, attempt);
+  const tries = await beginTry(db, { email, ip });
   const member = await db.manager.findOneBy(Member, { email: email.toLowerCase() });
   if (!(await passwords.verify(member?.passwordHash ?? null, password))) {
-    await noteFailure(db, attempt);
+    await noteFailure(db, tries);
     await inTransaction(db, (tx) =>
       audit(tx, null, { action: 'session.refused', objectKind: 'member', objectId: member?.id ?? 'unknown' }),
     );
     throw wrong();
   }
-  await clearFailures(db, attempt);
+  await clearFailures(db, { email, tries });
   if (passwords.needsRehash(member!.passwordHash))
     await db.manager.update(Member, { id: member!.id }, { passwordHash: await passwords.hash(password) });
   return member!;
