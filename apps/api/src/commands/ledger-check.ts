@@ -8,7 +8,11 @@ import { readSettings } from '../settings.ts';
 export async function ledgerCheck(): Promise<void> {
   const settings = readSettings(process.env);
   const world = await openWorld(settings);
-  const report = await checkLedger(world).finally(() => world.close());
-  console.log(toReportText(report, createWords({ zone: settings.MARKET_ZONE, currency: settings.MARKET_CURRENCY })));
-  process.exitCode = report.balanced ? 0 : 1;
+  try {
+    const report = await checkLedger(world);
+    console.log(toReportText(report, createWords({ zone: settings.MARKET_ZONE, currency: settings.MARKET_CURRENCY })));
+    process.exitCode = report.balanced ? 0 : 1;
+  } finally {
+    await world.close();
+  }
 }

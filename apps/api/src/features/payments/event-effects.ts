@@ -25,14 +25,20 @@ const checkout: Effect = async (world, { objectId }) => {
 const refund: Effect = async ({ db, payments, log }, { objectId }) => {
   const made = await payments.retrieveRefund(objectId);
   const id = rowIdOf('refund', made.reference);
-  if (!id) return void log.error({ refundId: objectId }, 'a refund that the market did not ask for');
+  if (!id) {
+    log.error({ refundId: objectId }, 'a refund that the market did not ask for');
+    return;
+  }
   await inTransaction(db, (tx) => recordRefund(tx, id, made));
 };
 
 const transfer: Effect = async ({ db, payments, log }, { objectId }) => {
   const made = await payments.retrieveTransfer(objectId);
   const id = rowIdOf('transfer', made.reference);
-  if (!id) return void log.error({ transferId: objectId }, 'a transfer that the market did not ask for');
+  if (!id) {
+    log.error({ transferId: objectId }, 'a transfer that the market did not ask for');
+    return;
+  }
   await inTransaction(db, (tx) => recordTransfer(tx, id, made));
 };
 

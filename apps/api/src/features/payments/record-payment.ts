@@ -15,7 +15,10 @@ type Parts = Pick<World, 'db' | 'payments' | 'settings' | 'log'>;
 /** Reads a payment at the processor as it stands now and moves ours forward. Any order, any number of times. */
 export async function refreshPayment(world: Parts, intentId: string): Promise<void> {
   const found = await world.payments.retrievePayment(intentId);
-  if (!found.paymentId) return void world.log.error({ intentId }, 'a payment that the market did not ask for');
+  if (!found.paymentId) {
+    world.log.error({ intentId }, 'a payment that the market did not ask for');
+    return;
+  }
   await inTransaction(world.db, (tx) => recordPayment(tx, found, world.settings.MARKET_CURRENCY));
 }
 
