@@ -3,7 +3,7 @@ import { dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { createOwnerSource } from '../data-source.ts';
 import { openWorld } from '../open-world.ts';
-import { seedMarket } from '../seeds/seed-market.ts';
+import { MarketNotEmpty, seedMarket } from '../seeds/seed-market.ts';
 import { readSettings } from '../settings.ts';
 
 /** Plays the demo market into an empty database. The last line printed names the sign-ins, for whoever started it. */
@@ -16,6 +16,10 @@ export async function seed(): Promise<void> {
   try {
     const signIns = await seedMarket({ world, owner, photosFolder: photosFolder() });
     console.log(JSON.stringify({ signIns }));
+  } catch (error) {
+    if (!(error instanceof MarketNotEmpty)) throw error;
+    console.error(error.message);
+    process.exitCode = 1;
   } finally {
     await owner.destroy();
     await world.close();

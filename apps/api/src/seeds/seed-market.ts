@@ -39,10 +39,17 @@ interface SeedParts {
   photosFolder: string;
 }
 
+/** The market is somebody's already. */
+export class MarketNotEmpty extends Error {
+  constructor() {
+    super('This market has members already; the demo is played only into an empty one.');
+  }
+}
+
 /**
  * Fills an empty market with its demo: six weeks of trade played through the market's own services, with its clock moved, and
  * the books proved at the end. Answers with one sign-in for each role.
- * @throws Error when there are members already, or when the books are off
+ * @throws MarketNotEmpty; Error when the books are off at the end
  */
 export async function seedMarket({ world, owner, photosFolder }: SeedParts): Promise<typeof signIns> {
   await assertEmpty(world);
@@ -70,7 +77,7 @@ export async function seedMarket({ world, owner, photosFolder }: SeedParts): Pro
 
 async function assertEmpty({ db }: World): Promise<void> {
   const rows: unknown[] = await db.query('select 1 from members limit 1');
-  if (rows.length > 0) throw new Error('This market has members already; the demo is played only into an empty one.');
+  if (rows.length > 0) throw new MarketNotEmpty();
 }
 
 async function assertBalanced(world: World): Promise<void> {
