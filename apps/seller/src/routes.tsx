@@ -15,7 +15,7 @@ export const routes: RouteObject[] = [
       {
         element: <RequireRole roles={['seller']} />,
         children: [
-          { path: '/', loader: () => redirect('/lots') },
+          { path: '/', loader: () => redirect('/lots'), element: null },
           { path: '/lots', lazy: () => import('./pages/MyLotsPage.tsx') },
           { path: '/lots/:lotCode', lazy: () => import('./pages/OwnLotPage.tsx') },
           { path: '/lots/:lotCode/withdraw', lazy: () => import('./pages/WithdrawPage.tsx') },

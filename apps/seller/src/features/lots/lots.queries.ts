@@ -1,5 +1,6 @@
 import { call } from '@lydite/client';
 import { queryOptions, useMutation, useQueryClient } from '@tanstack/react-query';
+import { useOnce } from '../../lib/use-once.ts';
 
 /** Own lots of all states. Bids and deadlines move while the page is open. */
 export const myLotsQuery = queryOptions({
@@ -28,7 +29,7 @@ export const listedLotQuery = (lotCode: string) =>
 function useLotChange<Answer>(send: () => Promise<Answer>) {
   const cache = useQueryClient();
   return useMutation({
-    mutationFn: send,
+    mutationFn: useOnce(send),
     onSuccess: () =>
       cache.invalidateQueries({ predicate: ({ queryKey: [noun, view] }) => noun === 'lots' && view !== 'opened' }),
   });

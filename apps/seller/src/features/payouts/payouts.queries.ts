@@ -1,5 +1,6 @@
 import { call, withFreshPassword } from '@lydite/client';
 import { queryOptions, useMutation } from '@tanstack/react-query';
+import { useOnce } from '../../lib/use-once.ts';
 
 export const payoutAccountQuery = queryOptions({
   queryKey: ['payouts', 'account'],
@@ -14,8 +15,7 @@ export const soldQuery = queryOptions({
 });
 
 /** Asks for the processor's own page, which opens once and for minutes, and goes there. */
-export const useSetUpPayouts = () =>
-  useMutation({
-    mutationFn: () => withFreshPassword(() => call('POST /my/payout-account/link')),
-    onSuccess: ({ url }) => location.assign(url),
-  });
+export function useSetUpPayouts() {
+  const open = useOnce(() => withFreshPassword(() => call('POST /my/payout-account/link')));
+  return useMutation({ mutationFn: open, onSuccess: ({ url }) => location.assign(url) });
+}

@@ -30,7 +30,7 @@ export function SettlementsTable({ deals }: { deals: readonly DealRow[] }) {
           <EmptyState title="None yet">Each sold lot gets a statement here that you can check by hand.</EmptyState>
         </div>
       ) : (
-        <div className="table-scroll">
+        <div className="table-scroll" role="region" aria-labelledby="settlements" tabIndex={0}>
           <table className="table">
             <thead>
               <tr>

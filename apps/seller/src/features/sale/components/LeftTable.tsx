@@ -16,7 +16,7 @@ export function LeftTable({ rows, currency, sellerFeeShare, usualMinor }: LeftTa
   return (
     <section className="mt-10" aria-labelledby="what-is-left">
       <h2 id="what-is-left">What it leaves you</h2>
-      <div className="table-scroll">
+      <div className="table-scroll" role="region" aria-labelledby="what-is-left" tabIndex={0}>
         <table className="table">
           <thead>
             <tr>
