@@ -10,11 +10,12 @@ import { Nothing } from '../lib/Nothing.tsx';
 import { SearchForm } from '../lib/SearchForm.tsx';
 import { useDeskSearch } from '../lib/use-desk-search.ts';
 
-/** The queue at the left, the chosen deal at the right; on phones one or the other. */
+/** The queue at the left, the chosen deal at the right, the most urgent unless one is chosen; on phones one or the other. */
 export function DealsPage() {
   const { data: deals } = useSuspenseQuery(deskDealsQuery(useDeskSearch()));
   const [search] = useSearchParams();
   const selected = search.get('deal');
+  const shown = selected ?? deals.rows[0]?.code;
   useTitle(selected ? `Deal ${selected}` : 'Deals');
   const back = new URLSearchParams(search);
   back.delete('deal');
@@ -29,22 +30,16 @@ export function DealsPage() {
             <Nothing noun="deals">A deal begins when a lot is awarded or taken.</Nothing>
           ) : (
             <>
-              <DealQueue deals={deals.rows} selected={selected} />
+              <DealQueue deals={deals.rows} selected={shown} />
               <DeskPager page={deals} noun="deals" />
             </>
           )}
         </div>
-        <div className="mt-5">
-          {selected ? (
-            <>
-              <p className="mb-4 lg:hidden">
-                <Link to={`?${back.toString()}`}>All deals</Link>
-              </p>
-              <Chosen code={selected} />
-            </>
-          ) : (
-            <p className="mute max-lg:hidden">Choose a deal to see its money and its timeline.</p>
-          )}
+        <div className={selected ? 'mt-5' : 'mt-5 max-lg:hidden'}>
+          <p className="mb-4 lg:hidden">
+            <Link to={`?${back.toString()}`}>All deals</Link>
+          </p>
+          {shown && <Chosen code={shown} />}
         </div>
       </div>
     </Page>

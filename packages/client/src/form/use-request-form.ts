@@ -36,7 +36,8 @@ export function useRequestForm<V extends FieldValues>({ schema, start, send }: R
   const form = useForm<V>({
     resolver: zodResolver(schema),
     defaultValues: start,
-    reValidateMode: 'onBlur',
+    // On blur an error would vanish, and the button move away, under the pointer that presses it.
+    reValidateMode: 'onSubmit',
     shouldFocusError: false,
   });
   const { errors, isSubmitting } = form.formState;

@@ -1,8 +1,9 @@
 import type { Role } from '@lydite/contracts';
 import { Page } from '@lydite/ui';
+import { useQuery } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
 import { Link, Navigate, Outlet, useLocation } from 'react-router-dom';
-import { useMember } from '../session/session.queries.ts';
+import { sessionQuery } from '../session/session.queries.ts';
 import { useTitle } from './use-title.ts';
 
 interface RequireRoleProps {
@@ -15,9 +16,11 @@ const wordOf: Record<Role, string> = { seller: 'selling', buyer: 'buying', assay
 
 /** Sends visitors to sign in and back; tells members which role a page needs. The API decides all the same. */
 export function RequireRole({ roles = [], children = <Outlet /> }: RequireRoleProps) {
-  const member = useMember();
+  const { data: session, error } = useQuery(sessionQuery);
   const { pathname, search } = useLocation();
-  if (member === undefined) return null;
+  if (!session && error) throw error;
+  if (!session) return null;
+  const { member } = session;
   if (member === null) return <Navigate to={`/sign-in?next=${encodeURIComponent(pathname + search)}`} replace />;
   if (roles.length > 0 && !roles.some((role) => member.roles.includes(role))) return <RoleMissing roles={roles} />;
   return children;

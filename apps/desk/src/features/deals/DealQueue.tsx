@@ -4,7 +4,7 @@ import { Link, useSearchParams } from 'react-router-dom';
 import { isEnded, stateWords, waitWords } from './deal-words.ts';
 
 /** Deals by their next deadline. */
-export function DealQueue({ deals, selected }: { deals: DeskDeal[]; selected: string | null }) {
+export function DealQueue({ deals, selected }: { deals: DeskDeal[]; selected: string | undefined }) {
   const [search] = useSearchParams();
   const { shortMoment, relative, money } = useWords();
   const to = (code: string) => {

@@ -70,7 +70,7 @@ function Group({ title, deals }: { title: string; deals: readonly DealRow[] }) {
               <p className="mute">
                 {deal.dutyBy
                   ? `by ${moment(deal.dutyBy)}, ${relative(deal.dutyBy)}`
-                  : `since ${moment(deal.updatedAt)}`}
+                  : `${finalStates.has(deal.state) ? 'on' : 'since'} ${moment(deal.updatedAt)}`}
               </p>
             </div>
             <div className="md:text-right">
