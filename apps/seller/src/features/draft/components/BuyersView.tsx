@@ -1,5 +1,6 @@
 import { formatSignificant, MINUS, NBSP, StreakCard, StreakInline } from '@lydite/ui';
 import type { LiveEstimate } from '../use-live-estimate.ts';
+import { SavedNote } from './SavedLine.tsx';
 
 /** What buyers would see of the draft as it stands, and what would narrow it. */
 export function BuyersView({ estimate, before, narrowing }: LiveEstimate) {
@@ -39,11 +40,15 @@ export function BuyersView({ estimate, before, narrowing }: LiveEstimate) {
 
 /** The same in one line, for the foot of the page on phones. */
 export function BuyersViewLine({ estimate }: Pick<LiveEstimate, 'estimate'>) {
-  if (!estimate) return null;
   return (
     <div className="mb-3">
-      <StreakInline estimate={estimate} size="row" />
-      <p className="tiny mute mt-1">What buyers would see now, 8 results in 10</p>
+      {estimate && <StreakInline estimate={estimate} size="row" />}
+      <p className="tiny mute mt-1 flex justify-between gap-4">
+        <span>{estimate && '8 results in 10, as buyers would see it'}</span>
+        <span>
+          <SavedNote />
+        </span>
+      </p>
     </div>
   );
 }

@@ -13,6 +13,8 @@ interface DraftStepsProps {
 export function DraftSteps({ code, current, notes }: DraftStepsProps) {
   return (
     <FormSteps
+      // A new page closes the list that phones open to get there.
+      key={current}
       title={`New lot ${code}, draft`}
       steps={stepIds.map((id) => ({ id, name: stepNames[id], note: notes[id], isCurrent: id === current }))}
       link={({ id, isCurrent }, children) => (

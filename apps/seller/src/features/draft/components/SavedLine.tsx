@@ -25,6 +25,17 @@ export function savedWords({ state, lot, isKeptHere }: Pick<DraftSnapshot, 'stat
   }
 }
 
+const shortWords: Partial<Record<DraftSnapshot['state'], string>> = {
+  changed: 'Saved in a moment',
+  saving: 'Saving',
+};
+
+/** The same in a word or two, for narrow screens. */
+export function SavedNote() {
+  const { state, lot } = useDraft();
+  return state === 'saved' ? `Saved ${clock.format(new Date(lot.savedAt))}` : (shortWords[state] ?? 'Not saved yet');
+}
+
 export function SavedLine() {
   return savedWords(useDraft());
 }

@@ -130,7 +130,7 @@ function Stands({ lot }: { lot: MyLotRow }) {
   const { money, moment } = useWords();
   const { stage, words, hasEnded } = standingOf(lot);
   const isOpen = stage === 'open' && !hasEnded;
-  const bids = lot.priceMinor !== null && money(lot.priceMinor);
+  const bids = !hasEnded && lot.priceMinor !== null && money(lot.priceMinor);
   const details = [
     bids && (isOpen && lot.bidders > 0 ? `${bids}, ${counted(lot.bidders, 'bidder')}` : bids),
     isOpen && lot.bidders === 0 && 'no bids yet',
