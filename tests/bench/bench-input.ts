@@ -1,5 +1,5 @@
 import { catalogue20261, estimateLot } from '@lydite/valuation';
-import { driverDraws, plansAfterDrivers } from '../../packages/valuation/src/lot/drivers.ts';
+import { driverDraws, plansByQuestion } from '../../packages/valuation/src/lot/drivers.ts';
 import { planLot } from '../../packages/valuation/src/lot/plan-lot.ts';
 import type { LotPlan } from '../../packages/valuation/src/lot/lot-plan.types.ts';
 import { sixLineLot } from './six-line-lot.ts';
@@ -21,10 +21,10 @@ const percents = [0.15, 1, 5, 10, 25, 50, 75, 90, 95, 99, 99.5, 99.85];
 export function benchInput(): BenchInput {
   const plan = planLot(sixLineLot, catalogue20261);
   const { lines } = estimateLot(sixLineLot, catalogue20261, { seed: 1 });
-  const afterPlans = plansAfterDrivers({ input: sixLineLot, catalogue: catalogue20261, plan, lines });
+  const plans = plansByQuestion({ input: sixLineLot, catalogue: catalogue20261, plan, lines });
   return {
     plan: { lines: plan.lines },
-    afterPlans,
+    afterPlans: [...plans.values()].map((planAfter) => planAfter('p50')),
     draws: 10_000,
     driverDraws,
     probabilities: percents.map((percent) => percent / 100),

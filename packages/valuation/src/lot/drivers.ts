@@ -1,8 +1,8 @@
 import type { Catalogue } from '../catalogue/catalogue.types.ts';
 import type { Driver, LineEstimate, LotInput, Quantiles } from '../types.ts';
 import { drawGold } from './draw-plan.ts';
-import type { LinePlan, LotPlan } from './lot-plan.types.ts';
-import { improveLot, measurementOf } from './measurement.ts';
+import type { Factor, LinePlan, LotPlan } from './lot-plan.types.ts';
+import { improveLot, measurementOf, type Reading } from './measurement.ts';
 import { planLot } from './plan-lot.ts';
 import { createQuantileFinder } from './quantile-finder.ts';
 import { varianceShares, type FactorShare } from './variance.ts';
@@ -29,14 +29,17 @@ export function driversOf(given: DriverInput): Driver[] {
   const nowG: [number, number] = [quantiles.p10, quantiles.p90];
   const rangeOf = createRangeFinder(seed, keysOf(plan));
   const now = rangeOf(plan);
-  const measured = createMeasurer(given, (after) => rangeOf(after));
-  return shares.map((each) => {
-    const { question, lines, after } = measured(each);
+  const known = new Map<string, [number, number]>();
+  return shares.map(({ factor, share }) => {
+    const { question, lines, planAfter } = measuring(given, factor);
+    // Figures that one measurement answers share the range expected after it.
+    const after = known.get(question) ?? rangeOf(planAfter('p50'));
+    known.set(question, after);
     return {
       lineId: lines.length === 1 ? (lines[0] as LinePlan).input.id : null,
       classCode: (lines[0] as LinePlan).materialClass.code,
-      parameter: each.factor.parameter,
-      share: each.share,
+      parameter: factor.parameter,
+      share,
       question,
       nowG,
       afterG: [(nowG[0] * after[0]) / now[0], (nowG[1] * after[1]) / now[1]],
@@ -44,10 +47,17 @@ export function driversOf(given: DriverInput): Driver[] {
   });
 }
 
-/** The lot as it would be planned after each measurement that its drivers name, each once. */
-export function plansAfterDrivers(given: Omit<DriverInput, 'quantiles' | 'seed'>): LotPlan[] {
-  const measured = createMeasurer(given, (after) => after);
-  return [...new Set(largestShares(given.plan).map((each) => measured(each).after))];
+type Measured = Omit<DriverInput, 'quantiles' | 'seed'>;
+export type PlanAfter = (reading: Reading) => LotPlan;
+
+/** For each question that the drivers ask, once: the lot as it would be planned after its answer. */
+export function plansByQuestion(given: Measured): Map<string, PlanAfter> {
+  const plans = new Map<string, PlanAfter>();
+  for (const { factor } of largestShares(given.plan)) {
+    const { question, planAfter } = measuring(given, factor);
+    if (!plans.has(question)) plans.set(question, planAfter);
+  }
+  return plans;
 }
 
 function largestShares(plan: LotPlan): FactorShare[] {
@@ -56,24 +66,17 @@ function largestShares(plan: LotPlan): FactorShare[] {
     .slice(0, mostDrivers);
 }
 
-/** The measurement for a figure and what is made of the lot after it; figures that one measurement answers share that. */
-function createMeasurer<Made>(
-  { input, catalogue, plan, lines: estimates }: Omit<DriverInput, 'quantiles' | 'seed'>,
-  make: (after: LotPlan) => Made,
-) {
-  const known = new Map<string, Made>();
-  return ({ factor }: FactorShare) => {
-    const lines = plan.lines.filter(({ gold }) =>
-      gold.some((term) => term.factors.some(({ key }) => key === factor.key)),
-    );
-    const [first] = lines as [LinePlan];
-    const measurement = measurementOf(factor, first.input);
-    const question = measurement.ask(lines.length === 1 ? first.label : `the ${first.materialClass.unit.many}`);
-    const after =
-      known.get(question) ?? make(planLot(improveLot(input, measurement, lines, factor, estimates), catalogue));
-    known.set(question, after);
-    return { question, lines, after };
-  };
+/** The measurement that answers a figure, where it is made, and what is made of the lot after it. */
+function measuring({ input, catalogue, plan, lines: estimates }: Measured, factor: Factor) {
+  const lines = plan.lines.filter(({ gold }) =>
+    gold.some((term) => term.factors.some(({ key }) => key === factor.key)),
+  );
+  const [first] = lines as [LinePlan];
+  const measurement = measurementOf(factor, first.input);
+  const planAfter: PlanAfter = (reading) =>
+    planLot(improveLot(input, { measurement, lines, factor, estimates }, reading), catalogue);
+  const question = measurement.ask(lines.length === 1 ? first.label : `the ${first.materialClass.unit.many}`);
+  return { question, lines, planAfter };
 }
 
 /** p10 and p90 of a plan's gold from a small sample; plans drawn with the same keys differ only where the plans do. */
@@ -83,6 +86,6 @@ function createRangeFinder(seed: number, keys: readonly string[]): (plan: LotPla
 }
 
 /** The figures of a lot, each once. */
-function keysOf(plan: LotPlan): string[] {
+export function keysOf(plan: LotPlan): string[] {
   return [...new Set(plan.lines.flatMap(({ gold }) => gold.flatMap(({ factors }) => factors.map(({ key }) => key))))];
 }

@@ -83,27 +83,45 @@ export function measurementOf({ parameter }: Factor, line: LineInput): Measureme
   }
 }
 
+/** What a measurement is supposed to read, by where it lies in what is expected now. */
+export type Reading = 'p10' | 'p50' | 'p90';
+
+const probabilityOf: Record<Reading, number> = { p10: 0.1, p50: 0.5, p90: 0.9 };
+
+export interface Improvement {
+  measurement: Measurement;
+  /** The lines that are measured, and the figure that is. */
+  lines: readonly LinePlan[];
+  factor: Factor;
+  estimates: readonly LineEstimate[];
+}
+
 /** The lot as it would be described after the measurement on the given lines. */
-export function improveLot(
-  input: LotInput,
-  measurement: Measurement,
-  measured: readonly LinePlan[],
-  { quantity }: Factor,
-  estimates: readonly LineEstimate[],
-): LotInput {
+export function improveLot(input: LotInput, improvement: Improvement, reading: Reading = 'p50'): LotInput {
   const lines = input.lines.map((line) => {
-    const plan = measured.find((each) => each.input.id === line.id);
-    const estimate = estimates.find(({ id }) => id === line.id);
+    const plan = improvement.lines.find((each) => each.input.id === line.id);
+    const estimate = improvement.estimates.find(({ id }) => id === line.id);
     if (!plan || !estimate) return line;
-    const { massG } = estimate;
-    const pieceMass = plan.materialClass.pieceMassG;
-    const pieces = line.pieces ?? (pieceMass ? massG / quantileOf(pieceMass.quantity, 0.5) : 1);
-    return measurement.improve(line, {
-      figure: quantileOf(quantity, 0.5),
-      massG,
-      pieces,
-      gradeGPerT: estimate.gradeGPerT.p50,
-    });
+    return improvement.measurement.improve(line, expectedOf(plan, estimate, improvement.factor, reading));
   });
   return { lines };
+}
+
+function expectedOf(
+  { input: line, materialClass: { pieceMassG } }: LinePlan,
+  estimate: LineEstimate,
+  { parameter, quantity }: Factor,
+  reading: Reading,
+): Expected {
+  const [middle, figure] = [quantileOf(quantity, 0.5), quantileOf(quantity, probabilityOf[reading])];
+  const asRead = (what: string) => (parameter === what && middle > 0 ? figure / middle : 1);
+  // A mass that was never given is told by the pieces and what one of them weighs.
+  const massG = estimate.massG * asRead('massG') * (line.massG === null ? asRead('pieceMassG') : 1);
+  const pieces = line.pieces ?? (pieceMassG ? estimate.massG / quantileOf(pieceMassG.quantity, 0.5) : 1);
+  return {
+    figure,
+    massG,
+    pieces: (pieces * asRead('pieces')) / (line.pieces === null ? asRead('pieceMassG') : 1),
+    gradeGPerT: estimate.gradeGPerT[reading],
+  };
 }

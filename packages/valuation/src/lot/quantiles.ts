@@ -1,7 +1,8 @@
 import type { Quantiles, Spread } from '../types.ts';
 import type { FindQuantiles } from './quantile-finder.ts';
 
-const percents: Record<keyof Quantiles, number> = {
+/** The probability of each stored quantile, in per cent. */
+export const percentOf: Readonly<Record<keyof Quantiles, number>> = {
   p0_15: 0.15,
   p01: 1,
   p05: 5,
@@ -15,8 +16,8 @@ const percents: Record<keyof Quantiles, number> = {
   p99_5: 99.5,
   p99_85: 99.85,
 };
-const names = Object.keys(percents) as (keyof Quantiles)[];
-const probabilities = names.map((name) => percents[name] / 100);
+const names = Object.keys(percentOf) as (keyof Quantiles)[];
+const probabilities = names.map((name) => percentOf[name] / 100);
 
 export function quantilesOf(values: Float64Array, find: FindQuantiles): Quantiles {
   const found = find(values, probabilities);
