@@ -23,7 +23,7 @@ export function DeliveryFields({ delivery, currency, onChange }: DeliveryFieldsP
         ]}
         onChange={(way) => onChange({ way })}
       />
-      <div className="field-pair">
+      <div className="field-pair items-end">
         <TextField
           label="Where the lot is"
           id="delivery.place"

@@ -38,7 +38,7 @@ export function SaleFields({ sale, currency, onChange }: SaleFieldsProps) {
         onChange={(form) => onChange({ form })}
       />
       {sale.form === 'open-bids' ? (
-        <div className="field-pair">
+        <div className="field-pair items-end">
           {price('Start price', 'startMinor', 'Where bidding begins.')}
           {price('Lowest price', 'reserveMinor', 'Buyers read only whether it is reached.')}
         </div>
