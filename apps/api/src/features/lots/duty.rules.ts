@@ -6,6 +6,7 @@ export interface DutyFacts {
   deliveryWay: 'seller-sends' | 'collection' | null;
   /** End of the seller's time to countersign the weigh-in; null once it is countersigned or over. */
   countersignBy: Date | null;
+  /** The seller's share waits for their payout account, which is not the desk's to set up. */
   payoutWaits: boolean;
 }
 

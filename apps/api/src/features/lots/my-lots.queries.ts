@@ -27,7 +27,7 @@ const sql = `
            'gradeGPerT', e.result -> 'gradeGPerT', 'density', e.result -> 'density') end as estimate,
          (case l.form when 'asking-price' then l.asking_minor else l.price_minor end)::int as "priceMinor", l.bidders,
          l.closes_at as "closesAt", l.delivery_way as "deliveryWay", d.code as "dealCode", d.state as "dealState", d.due_at as "dealDueAt",
-         d.frozen_at is not null as frozen, w.countersign_ends_at as "countersignBy", t.deal_id is not null as "payoutWaits",
+         d.frozen_at is not null as frozen, w.countersign_ends_at as "countersignBy", t.deal_id is not null and not coalesce(a.transfers_active and a.payouts_enabled, false) as "payoutWaits",
          greatest(l.saved_at, l.listed_at, l.closed_at, d.updated_at) as "updatedAt"
     from lots l
     left join estimates e on e.lot_id = l.id
@@ -35,6 +35,7 @@ const sql = `
     left join lateral (select id from photos where lot_id = l.id and removed_at is null order by position, id limit 1) cover on l.state = 'draft'
     left join deals d on d.lot_id = l.id and d.state <> 'cancelled'
     left join weigh_ins w on w.deal_id = d.id and w.countersigned_at is null and w.countersign_ends_at > $2
+    left join payout_accounts a on a.member_id = l.seller_id
     left join lateral (select deal_id from transfers where deal_id = d.id and member_id = $1 and state = 'waiting' limit 1) t on true
    where l.seller_id = $1 and l.state <> 'deleted'
    order by "updatedAt" desc, l.id limit 500`;

@@ -163,12 +163,15 @@ test('the seller’s share waits for the account and for the papers, with the re
   expect(await transferOf(deal)).toMatchObject({ state: 'waiting', reason: 'Set up your payout account.' });
   const before = await (await deal.seller()).call('GET /my/payout-account');
   expect(before.body).toMatchObject({ state: 'none', verified: false, waitingMinor: sellerGetsMinor, payouts: [] });
+  const duty = async () => (await (await deal.seller()).call('GET /my/lots')).body[0]!.duty;
+  expect(await duty()).toBe('Set up your payout account');
 
   await setUpPayouts(stage, deal);
   expect(await transferOf(deal)).toMatchObject({
     state: 'waiting',
     reason: 'The desk still has to see your identity and licence papers.',
   });
+  expect(await duty()).toBe('');
   await market.db.query('update members set verified_at = market_now() where id = $1', [deal.sellerId]);
   await market.db.transaction((tx) => releaseWaitingTransfers(tx, deal.sellerId));
   await market.work();
