@@ -6,7 +6,7 @@ import jwt from 'jsonwebtoken';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { addMember } from '../../test/factories.ts';
 import { openMarket, type Caller, type Market } from '../../test/market.ts';
-import { cookieNames } from './session.ts';
+import { cookieNames } from './session-cookies.ts';
 
 /** Numbers are those of the checklist in docs/security.md (OWASP ASVS 5.0.0). */
 let market: Market;

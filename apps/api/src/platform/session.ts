@@ -1,23 +1,14 @@
 import { createHash, randomBytes, randomUUID } from 'node:crypto';
 import type { Role } from '@lydite/contracts';
-import type { CookieOptions, Request, Response } from 'express';
 import jwt from 'jsonwebtoken';
 import type { DataSource, EntityManager } from 'typeorm';
 import { z } from 'zod';
 import type { Settings } from '../settings.ts';
 import { AppError } from './app-error.ts';
 import type { SessionGate } from './routes.ts';
+import { cookieNames } from './session-cookies.ts';
+import { sessionLimits } from './session-limits.ts';
 import { inTransaction } from './transaction.ts';
-
-export const cookieNames = { access: '__Host-lydite-access', refresh: '__Host-lydite-refresh' } as const;
-
-/** Lifetimes of a session in seconds; the documentation's table is tested against them. */
-export const sessionLimits = {
-  access: 10 * 60,
-  fresh: 10 * 60,
-  idle: { operator: 30 * 60, others: 8 * 3600 },
-  absolute: { operator: 12 * 3600, others: 30 * 24 * 3600 },
-} as const;
 
 const token = { issuer: 'lydite', audience: 'lydite-market', algorithm: 'HS256' } as const;
 const claims = z.object({
@@ -201,25 +192,3 @@ export async function rolesOf(tx: EntityManager, memberId: string): Promise<Role
   ]);
   return rows.map((row) => row.role);
 }
-
-const cookie: CookieOptions = { httpOnly: true, secure: true, path: '/' };
-
-/** `Lax` lets links to PDFs and pictures work; the refresh token never leaves with a request from elsewhere. */
-export function setSessionCookies(res: Response, tokens: Tokens): void {
-  res.cookie(cookieNames.access, tokens.access, { ...cookie, sameSite: 'lax', maxAge: sessionLimits.access * 1000 });
-  res.cookie(cookieNames.refresh, tokens.refresh, {
-    ...cookie,
-    sameSite: 'strict',
-    maxAge: sessionLimits.absolute.others * 1000,
-  });
-}
-
-export function clearSessionCookies(res: Response): void {
-  res.clearCookie(cookieNames.access, { ...cookie, sameSite: 'lax' });
-  res.clearCookie(cookieNames.refresh, { ...cookie, sameSite: 'strict' });
-}
-
-export const refreshCookieOf = (req: Request): string | undefined => {
-  const value: unknown = req.cookies?.[cookieNames.refresh];
-  return typeof value === 'string' ? value : undefined;
-};

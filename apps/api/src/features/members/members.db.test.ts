@@ -1,7 +1,7 @@
 import { afterAll, beforeAll, beforeEach, expect, test } from 'vitest';
 import { addMember } from '../../../test/factories.ts';
 import { openMarket, type Caller, type Market } from '../../../test/market.ts';
-import { cookieNames } from '../../platform/session.ts';
+import { cookieNames } from '../../platform/session-cookies.ts';
 
 let market: Market;
 let visitor: Caller;

@@ -1,7 +1,8 @@
 import type { Response } from 'express';
 import type { Actor } from '../../platform/actor.ts';
 import type { On } from '../../platform/routes.ts';
-import { clearSessionCookies, refreshCookieOf, setSessionCookies, type Tokens } from '../../platform/session.ts';
+import type { Tokens } from '../../platform/session.ts';
+import { clearSessionCookies, refreshCookieOf, setSessionCookies } from '../../platform/session-cookies.ts';
 import type { MembersService } from './members.service.ts';
 
 export function memberRoutes(on: On, members: MembersService): void {

@@ -24,9 +24,3 @@ export async function photosOf(
   });
   return rows.map(toPhotoView);
 }
-
-/** Id of a lot's first photo; null when it has none. */
-export async function coverOf(tx: EntityManager, lotId: string): Promise<string | null> {
-  const [first] = await photosOf(tx, { lotId });
-  return first?.id ?? null;
-}
