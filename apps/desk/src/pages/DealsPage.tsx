@@ -23,7 +23,7 @@ export function DealsPage() {
     <Page>
       <h1>Deals</h1>
       <p className="lead">By the next deadline; ended ones last.</p>
-      <div className="mt-2 grid gap-x-12 lg:grid-cols-[25rem_minmax(0,1fr)]">
+      <div className="mt-2 grid grid-cols-1 gap-x-12 lg:grid-cols-[25rem_minmax(0,1fr)]">
         <div className={selected ? 'max-lg:hidden' : undefined}>
           <SearchForm hint="deal, lot, title or member" />
           {deals.rows.length === 0 ? (

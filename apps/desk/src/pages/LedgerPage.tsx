@@ -35,7 +35,7 @@ export function Component() {
         <h2 id="checks-title">Checks</h2>
         <ChecksTable checks={report.checks} />
       </section>
-      <div className="grid gap-x-12 lg:grid-cols-[minmax(0,1fr)_21rem]">
+      <div className="grid grid-cols-1 gap-x-12 lg:grid-cols-[minmax(0,1fr)_21rem]">
         <section aria-labelledby="accounts-title" className="mt-10">
           <h2 id="accounts-title">Accounts</h2>
           {report.accounts.length === 0 ? (

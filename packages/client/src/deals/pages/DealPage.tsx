@@ -54,7 +54,7 @@ export function Component() {
             )
           }
         />
-        <div className="mt-7 grid gap-x-12 lg:grid-cols-[minmax(0,1fr)_21rem] lg:grid-rows-[auto_1fr]">
+        <div className="mt-7 grid grid-cols-1 gap-x-12 lg:grid-cols-[minmax(0,1fr)_21rem] lg:grid-rows-[auto_1fr]">
           <div>
             <div className="grid gap-4">
               <PaymentNotice deal={deal} />
