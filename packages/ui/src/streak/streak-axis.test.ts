@@ -40,9 +40,9 @@ describe('the money axis', () => {
 
 describe('the list’s axis', () => {
   it('keeps what lies outside at its ends', () => {
-    expect(gradeShare(20)).toBe(0);
+    expect(gradeShare(10)).toBe(0);
     expect(gradeShare(1)).toBe(0);
-    expect(gradeShare(6000)).toBe(1);
+    expect(gradeShare(20_000)).toBe(1);
     expect(gradeShare(50_000)).toBe(1);
   });
 });

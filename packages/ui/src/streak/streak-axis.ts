@@ -4,10 +4,10 @@ import type { StreakGeometry } from './geometry.ts';
 import { outlineOf, type MoneyScale, type StreakEstimate, type StreakOutline } from './streak-types.ts';
 
 /** Ends of the list's common axis, grams of gold per tonne. */
-export const GRADE_AXIS: readonly [number, number] = [20, 6000];
+export const GRADE_AXIS: readonly [number, number] = [10, 20_000];
 /** Wanted number of ticks on the wide stone. */
 const TICKS = 12;
-const GRADE_TICKS = [50, 100, 200, 500, 1000, 2000];
+const GRADE_TICKS = [20, 50, 100, 200, 500, 1000, 2000, 5000, 10_000];
 
 export interface StreakAxis {
   /** Position in px of an amount of gold in grams. */
