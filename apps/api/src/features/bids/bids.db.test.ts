@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { afterAll, beforeAll, beforeEach, describe, expect, test } from 'vitest';
+import { placeBid as bid } from '../../../test/bidding.ts';
 import { addMember } from '../../../test/factories.ts';
 import { openMarket, type Caller, type Market } from '../../../test/market.ts';
 import { addOpenLot } from '../../../test/open-lot.ts';
@@ -21,8 +22,6 @@ beforeEach(async () => {
 });
 afterAll(() => market.close());
 
-const bid = (caller: Caller, lotCode: string, ceilingMinor: number, attempt = randomUUID()) =>
-  caller.call('POST /lots/:lotCode/bids', { params: { lotCode }, body: { ceilingMinor, attempt } });
 const lotRow = async (id: string) => (await market.db.query('select * from lots where id = $1', [id]))[0];
 const dealsOf = (lotId: string) =>
   market.db.query('select * from deals where lot_id = $1 order by awarded_at', [lotId]);
