@@ -8,19 +8,18 @@ export function Timeline({ events }: { events: DealView['events'] }) {
     <section aria-labelledby="timeline-title" className="mt-10">
       <h2 id="timeline-title">Timeline</h2>
       <ol className="ruled ruled-head mt-2 pt-0!">
-        {events
-          .toSorted((a, b) => b.at.localeCompare(a.at))
-          .map((event) => (
-            <li key={`${event.at} ${event.title}`} className="grid gap-x-6 md:grid-cols-[12rem_minmax(0,1fr)]">
-              <time dateTime={event.at} className="mono small mute">
-                {moment(event.at)}
-              </time>
-              <div className="small">
-                <b>{event.title}</b>, {event.by}
-                {event.detail && <p className="mute">{event.detail}</p>}
-              </div>
-            </li>
-          ))}
+        {/* They come in the order they happened; several steps may share a moment. */}
+        {events.toReversed().map((event) => (
+          <li key={`${event.at} ${event.title}`} className="grid gap-x-6 md:grid-cols-[12rem_minmax(0,1fr)]">
+            <time dateTime={event.at} className="mono small mute">
+              {moment(event.at)}
+            </time>
+            <div className="small">
+              <b>{event.title}</b>, {event.by}
+              {event.detail && <p className="mute">{event.detail}</p>}
+            </div>
+          </li>
+        ))}
       </ol>
     </section>
   );

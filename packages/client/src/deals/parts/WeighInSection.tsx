@@ -5,6 +5,12 @@ import { useWords } from '../../market/use-words.ts';
 
 const signed = (massG: number): string => `${massG > 0 ? '+' : massG < 0 ? MINUS : ''}${formatMassG(Math.abs(massG))}`;
 
+function countersignWords(deal: DealView, { countersignedAt }: WeighInView, moment: (iso: string) => string): string {
+  if (countersignedAt) return moment(countersignedAt);
+  if (!deal.settlement) return 'Not yet';
+  return deal.claim ? 'By accepting the claim' : 'Not in time: the weigh-in stands';
+}
+
 /** What came off the scale, against what was declared. */
 export function WeighInSection({ deal, weighIn }: { deal: DealView; weighIn: WeighInView }) {
   const { moment, exactMoney } = useWords();
@@ -47,7 +53,7 @@ export function WeighInSection({ deal, weighIn }: { deal: DealView; weighIn: Wei
             { name: 'Entered', value: moment(weighIn.at) },
             {
               name: 'Countersigned',
-              value: weighIn.countersignedAt ? moment(weighIn.countersignedAt) : 'Not yet',
+              value: countersignWords(deal, weighIn, moment),
             },
             ...(weighIn.note ? [{ name: 'Note', value: weighIn.note }] : []),
           ]}
