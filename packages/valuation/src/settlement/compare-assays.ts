@@ -1,4 +1,4 @@
-import { Decimal } from 'decimal.js';
+import type { Decimal } from 'decimal.js';
 import { toDecimal, type Written } from './decimal-argument.ts';
 
 export interface AssayComparison {

@@ -1,4 +1,4 @@
-import { Decimal } from 'decimal.js';
+import type { Decimal } from 'decimal.js';
 import { requireMinor, shareOf } from '../money/share-of.ts';
 import { middleOfThree } from './compare-assays.ts';
 import { toDecimal, type Written } from './decimal-argument.ts';

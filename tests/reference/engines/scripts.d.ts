@@ -1,0 +1,3 @@
+declare module '*/scripts/checks/browser.mjs' {
+  export function ensureBrowser(): string;
+}
