@@ -1,6 +1,7 @@
 import { useWords } from '@lydite/client';
 import type { DeskDeal } from '@lydite/contracts';
 import { FactList } from '@lydite/ui';
+import { ApproveStrip } from './ApproveStrip.tsx';
 import { stateWords, waitWords } from './deal-words.ts';
 
 /** One deal in read mode: its money, its deadline and its timeline. */
@@ -31,6 +32,7 @@ export function DealCase({ deal }: { deal: DeskDeal }) {
           waitWords(deal)
         )}
       </p>
+      <ApproveStrip deal={deal} />
       <div className="mt-4">
         <FactList
           facts={[
@@ -43,18 +45,16 @@ export function DealCase({ deal }: { deal: DeskDeal }) {
       </div>
       <h3 className="mt-8">Timeline</h3>
       <ol className="ruled mt-2 border-t-[1.5px] border-ink">
-        {deal.events
-          .toSorted((a, b) => b.at.localeCompare(a.at))
-          .map((event) => (
-            <li key={`${event.at} ${event.title}`} className="small grid gap-x-6 md:grid-cols-[12rem_minmax(0,1fr)]">
-              <time dateTime={event.at} className="mono mute">
-                {moment(event.at)}
-              </time>
-              <span>
-                <b>{event.title}</b>, {event.by}
-              </span>
-            </li>
-          ))}
+        {deal.events.toReversed().map((event) => (
+          <li key={`${event.at} ${event.title}`} className="small grid gap-x-6 md:grid-cols-[12rem_minmax(0,1fr)]">
+            <time dateTime={event.at} className="mono mute">
+              {moment(event.at)}
+            </time>
+            <span>
+              <b>{event.title}</b>, {event.by}
+            </span>
+          </li>
+        ))}
       </ol>
     </article>
   );
