@@ -33,10 +33,11 @@ export const resetRequest = z.strictObject({ email });
 export const resetCompletion = z.strictObject({ token: z.string().min(20).max(200), password: newPassword });
 export const passwordRequest = z.strictObject({ password: z.string().min(1, 'Enter your password.').max(1024) });
 export const passwordChange = z.strictObject({ currentPassword: z.string().min(1).max(1024), newPassword });
+/** `roles` are those a member may choose; operators and assayers may go without. */
 export const profileChange = z.strictObject({
   name: memberName,
   place,
-  roles: z.array(z.enum(['seller', 'buyer'])).min(1),
+  roles: z.array(z.enum(['seller', 'buyer'])),
 });
 
 export const ownMember = z

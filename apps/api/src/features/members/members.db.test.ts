@@ -212,3 +212,12 @@ test('idle and absolute limits end a session', async () => {
   expect((await caller.call('GET /session')).body.member).toBeNull();
   expect((await caller.call('POST /session/refresh')).body.member).toBeNull();
 });
+
+test('nobody is left without a role; an operator needs neither selling nor buying', async () => {
+  const none = { name: 'Sallowby Recovery', place: 'Sallowby', roles: [] };
+  const { caller } = await join();
+  expect((await caller.call('PUT /members/me', { body: none })).problem).toMatchObject({ fields: [{ path: 'roles' }] });
+  expect((await caller.call('GET /session')).body.member!.roles).toEqual(['buyer']);
+  const operator = await market.as(await addMember(market, { roles: ['operator'] }));
+  expect((await operator.call('PUT /members/me', { body: none })).body.roles).toEqual(['operator']);
+});

@@ -3,6 +3,7 @@ import type { EntityManager } from 'typeorm';
 import type { Actor } from '../../platform/actor.ts';
 import { AppError } from '../../platform/app-error.ts';
 import { audit } from '../../platform/audit.ts';
+import { rolesOf } from '../../platform/session.ts';
 import { inTransaction } from '../../platform/transaction.ts';
 import type { World } from '../../platform/world.ts';
 import { Member } from './member.entity.ts';
@@ -31,6 +32,10 @@ export const changeProfile = (
         actor.id,
         role,
       ]);
+    if ((await rolesOf(tx, actor.id)).length === 0) {
+      const message = 'Choose selling, buying or both.';
+      throw new AppError('request.invalid', message, { fields: [{ path: 'roles', message }] });
+    }
     await audit(tx, actor, { action: 'member.profile_change', objectKind: 'member', objectId: actor.id });
     return (await ownMember(tx, actor.id))!;
   });
