@@ -1,14 +1,14 @@
 import { catalogue20261, estimateLot } from '@lydite/valuation';
 import { driverDraws, plansByQuestion } from '../../packages/valuation/src/lot/drivers.ts';
 import { planLot } from '../../packages/valuation/src/lot/plan-lot.ts';
-import type { LotPlan } from '../../packages/valuation/src/lot/lot-plan.types.ts';
+import type { LinesPlan } from '../../packages/valuation/src/lot/lot-plan.types.ts';
 import { sixLineLot } from './six-line-lot.ts';
 
 /** What the rival implementations are given: the model of the lot, ready to draw, and what to make of the draws. */
 export interface BenchInput {
-  plan: Pick<LotPlan, 'lines'>;
+  plan: LinesPlan;
   /** The lot after each of the measurements that the drivers name. */
-  afterPlans: Pick<LotPlan, 'lines'>[];
+  afterPlans: LinesPlan[];
   draws: number;
   driverDraws: number;
   probabilities: number[];

@@ -11,14 +11,14 @@ import time
 import numpy as np
 
 
-def draw_plan(plan, draws, rng):
-    columns = {}
+def line_drawer(draws, rng, columns):
+    """Draws a line's gold, mass and components; figures already drawn are found in columns."""
 
     def column(factor):
-        key = factor["key"]
+        quantity = factor["quantity"]
+        kind = quantity["kind"]
+        key = factor["key"] if kind == "lognormal" else (factor["key"], *quantity.values())
         if key not in columns:
-            quantity = factor["quantity"]
-            kind = quantity["kind"]
             if kind == "lognormal":
                 columns[key] = rng.standard_normal(draws)
             elif kind == "uniform":
@@ -49,15 +49,25 @@ def draw_plan(plan, draws, rng):
         np.multiply(log_sum, constant, out=log_sum)
         return log_sum if product is None else np.multiply(log_sum, product, out=log_sum)
 
-    lines = []
-    for line in plan["lines"]:
+    def draw_line(line, with_mass):
         components = [draw_term(term) for term in line["gold"]]
-        mass = draw_term(line["mass"]) if line["mass"] else np.zeros(draws)
         gold = components[0] if len(components) == 1 else np.sum(components, axis=0)
-        lines.append((gold, mass, components))
-    total = np.sum([gold for gold, _, _ in lines], axis=0)
-    mass = np.sum([mass for _, mass, _ in lines], axis=0)
-    return total, mass, lines, columns
+        return gold, draw_term(line["mass"]) if with_mass else None, components
+
+    return draw_line
+
+
+def ranges_after(given, rng):
+    """p10 and p90 after each measurement over those of now, from a small sample; unchanged lines are drawn once."""
+    draws = given["driverDraws"]
+    draw_line = line_drawer(draws, rng, {})
+    kept = [draw_line(line, False)[0] for line in given["plan"]["lines"]]
+    now = np.quantile(np.sum(kept, axis=0), [0.1, 0.9])
+    after = []
+    for lines in given["afterPlans"]:
+        parts = [kept[i] if line is None else draw_line(line, False)[0] for i, line in enumerate(lines)]
+        after.append(np.quantile(np.sum(parts, axis=0), [0.1, 0.9]) / now)
+    return after
 
 
 def density(gold, quantiles, sd, bins):
@@ -75,7 +85,11 @@ def density(gold, quantiles, sd, bins):
 def estimate(given, seed):
     draws, probabilities, beads = given["draws"], given["probabilities"], given["beads"]
     rng = np.random.default_rng(seed)
-    gold, mass, lines, columns = draw_plan(given["plan"], draws, rng)
+    columns = {}
+    draw_line = line_drawer(draws, rng, columns)
+    lines = [draw_line(line, True) for line in given["plan"]["lines"]]
+    gold = np.sum([line_gold for line_gold, _, _ in lines], axis=0)
+    mass = np.sum([line_mass for _, line_mass, _ in lines], axis=0)
 
     def spread(values):
         return values.mean(), values.std(ddof=1), np.quantile(values, probabilities)
@@ -99,10 +113,6 @@ def estimate(given, seed):
         )
     # First-order shares by squared correlation with each figure.
     shares = {key: np.dot(values - values.mean(), centred) ** 2 / (np.var(values) * draws * draws * variance) for key, values in columns.items()}
-    now = np.quantile(draw_plan(given["plan"], given["driverDraws"], rng)[0], [0.1, 0.9])
-    after = []
-    for plan in given["afterPlans"]:
-        after.append(np.quantile(draw_plan(plan, given["driverDraws"], rng)[0], [0.1, 0.9]) / now)
     return {
         "mean": mean,
         "sd": sd,
@@ -112,8 +122,8 @@ def estimate(given, seed):
         "mass": np.quantile(mass, 0.5),
         "density": density(gold, quantiles, sd, given["bins"]),
         "lines": line_results,
-        "shares": sorted(shares.items(), key=lambda item: -item[1]),
-        "after": after,
+        "shares": sorted(shares.values(), reverse=True),
+        "after": ranges_after(given, rng),
     }
 
 

@@ -21,7 +21,9 @@ export async function startNumpy(python: string, input: BenchInput): Promise<Num
     if (done) throw new Error('the NumPy side ended');
     return JSON.parse(value) as Record<string, number>;
   };
-  const { numpy } = (await ask(JSON.stringify(input))) as unknown as { numpy: string };
+  const { numpy } = (await ask(JSON.stringify({ ...input, afterPlans: changedLines(input) }))) as unknown as {
+    numpy: string;
+  };
   return {
     version: numpy,
     run: async (seed) => {
@@ -31,3 +33,7 @@ export async function startNumpy(python: string, input: BenchInput): Promise<Num
     stop: () => child.stdin.end(),
   };
 }
+
+/** Lines that a measurement leaves as they were are named by null, so that neither side draws them again. */
+const changedLines = ({ plan, afterPlans }: BenchInput) =>
+  afterPlans.map(({ lines }) => lines.map((line, i) => (line === plan.lines[i] ? null : line)));

@@ -39,27 +39,41 @@ export function plainEstimate({ plan, afterPlans, draws, driverDraws, probabilit
   };
 }
 
-type Figures = Map<string, number>;
-
 function drawLot({ lines }: BenchInput['plan'], draws: number) {
+  const places = placesOf(lines);
+  const figures = new Array<number>(Math.max(-1, ...places.values()) + 1);
   return Array.from({ length: draws }, () => {
-    const figures: Figures = new Map();
+    figures.fill(Number.NaN);
     const drawn = lines.map(({ gold, mass }) => {
-      const components = gold.map((term) => drawTerm(term, figures));
+      const components = gold.map((term) => drawTerm(term, figures, places));
       const sum = components.reduce((all, one) => all + one, 0);
-      return { components, gold: sum, mass: mass ? drawTerm(mass, figures) : 0 };
+      return { components, gold: sum, mass: mass ? drawTerm(mass, figures, places) : 0 };
     });
     const gold = drawn.reduce((sum, line) => sum + line.gold, 0);
-    return { lines: drawn, gold, mass: drawn.reduce((sum, line) => sum + line.mass, 0), figures };
+    return { lines: drawn, gold, mass: drawn.reduce((sum, line) => sum + line.mass, 0), figures: [...figures] };
   });
 }
 
-function drawTerm({ constant, factors }: Term, figures: Figures): number {
+/** Every figure has one place in a draw, whatever terms it occurs in. */
+function placesOf(lines: BenchInput['plan']['lines']): Map<Term['factors'][number], number> {
+  const byKey = new Map<string, number>();
+  const places = new Map<Term['factors'][number], number>();
+  for (const { gold, mass } of lines) {
+    for (const factor of [...(mass ? [mass] : []), ...gold].flatMap(({ factors }) => factors)) {
+      const place = byKey.get(factor.key) ?? byKey.size;
+      byKey.set(factor.key, place);
+      places.set(factor, place);
+    }
+  }
+  return places;
+}
+
+function drawTerm({ constant, factors }: Term, figures: number[], places: ReturnType<typeof placesOf>): number {
   let product = constant;
-  for (const { key, quantity, power } of factors) {
-    const value = figures.get(key) ?? drawQuantity(quantity);
-    figures.set(key, value);
-    product *= value ** power;
+  for (const factor of factors) {
+    const place = places.get(factor)!;
+    if (Number.isNaN(figures[place])) figures[place] = drawQuantity(factor.quantity);
+    product *= figures[place]! ** factor.power;
   }
   return product;
 }
@@ -100,12 +114,12 @@ function density(sorted: number[], bins: number): number[] {
 }
 
 /** First-order shares by squared correlation with each figure. */
-function sharesOf(drawn: ReturnType<typeof drawLot>, mean: number, sd: number): [string, number][] {
-  return [...drawn[0]!.figures.keys()].map((key) => {
-    const values = drawn.map(({ figures }) => figures.get(key)!);
+function sharesOf(drawn: ReturnType<typeof drawLot>, mean: number, sd: number): number[] {
+  return drawn[0]!.figures.map((_, place) => {
+    const values = drawn.map(({ figures }) => figures[place]!);
     const middle = values.reduce((sum, value) => sum + value, 0) / values.length;
     const variance = values.reduce((sum, value) => sum + (value - middle) ** 2, 0) / values.length;
     const shared = drawn.reduce((sum, { gold }, i) => sum + (gold - mean) * (values[i]! - middle), 0) / values.length;
-    return [key, shared ** 2 / (variance * sd ** 2)];
+    return shared ** 2 / (variance * sd ** 2);
   });
 }

@@ -10,7 +10,7 @@ export function drawSum(quantities: readonly Quantity[], seed: number, draws: nu
     return { id: `${i}`, name: 'input', constant: 1, factors };
   });
   const line = { gold, mass: null } as unknown as LinePlan;
-  return drawPlan({ lines: [line], warnings: [] }, { seed, draws }).goldG;
+  return drawPlan({ lines: [line] }, { seed, draws }).goldG;
 }
 
 /** The 95 % interval that leaves as much out below as above. */

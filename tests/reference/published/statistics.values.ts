@@ -44,7 +44,7 @@ const sample = [3.1, 1.4, 4.9, 2.2, 8.8, 6.5, 7.7];
 function shareOfOneFactor(): number {
   const factors = ['x', 'y'].map((key) => ({ key, parameter: key, quantity: uniform(0, 1), power: 1 }));
   const line = { gold: [{ id: 'xy', name: 'xy', constant: 1, factors }], mass: null } as unknown as LinePlan;
-  return varianceShares({ lines: [line], warnings: [] })[0]?.share ?? Number.NaN;
+  return varianceShares({ lines: [line] })[0]?.share ?? Number.NaN;
 }
 
 export const statisticsValues: PublishedValue[] = [

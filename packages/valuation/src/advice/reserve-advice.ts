@@ -1,6 +1,7 @@
 import type { Estimate } from '../types.ts';
 import { drawPlan, type PlanDraws } from '../lot/draw-plan.ts';
 import { keysOf, plansByQuestion, type PlanAfter } from '../lot/drivers.ts';
+import type { LinesPlan } from '../lot/lot-plan.types.ts';
 import type { Reading } from '../lot/measurement.ts';
 import type { LotDraws } from '../lot/simulate-lot.ts';
 import { netToSeller, type SellerFees, type SellerNet } from '../money/net-to-seller.ts';
@@ -67,7 +68,7 @@ export function reserveAdvice({ draws, estimate, market, fees, sets = typicalTer
   const plans = plansByQuestion({ ...draws, lines: estimate.lines });
   const bidsOn = (trial: PlanDraws) => sets.map(({ terms }) => valueLot(trial, terms, market).highestSafeBidMinor ?? 0);
   const keys = keysOf(draws.plan);
-  const drawTrial = (plan: LotDraws['plan']) => drawPlan(plan, { seed: draws.seed, draws: trialDraws, keys });
+  const drawTrial = (plan: LinesPlan) => drawPlan(plan, { seed: draws.seed, draws: trialDraws, keys });
   const now = bidsOn(drawTrial(draws.plan));
   const expected = (planAfter: PlanAfter) => {
     const byReading = readings.map(([reading]) => bidsOn(drawTrial(planAfter(reading))));

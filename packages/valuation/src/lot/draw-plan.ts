@@ -1,7 +1,7 @@
 import type { Quantity } from '../types.ts';
 import { exponentials, mostExponent } from './exponential.ts';
 import { createLattice, type Column } from './lattice.ts';
-import type { Factor, LotPlan, Term } from './lot-plan.types.ts';
+import type { Factor, LinesPlan, Term } from './lot-plan.types.ts';
 import { normalScores, valuesOf } from './score-table.ts';
 
 export interface PlanDraws {
@@ -21,7 +21,7 @@ interface DrawOptions {
  * @param options seed, any integer; draws, at least 100; keys, whose figures take the first coordinates in this order, so that
  * two plans drawn with the same keys differ only where the plans do
  */
-export function drawPlan(plan: LotPlan, options: DrawOptions): PlanDraws {
+export function drawPlan(plan: LinesPlan, options: DrawOptions): PlanDraws {
   const { draws } = options;
   const draw = createTermDrawer(options);
   const lines = plan.lines.map(({ mass, gold }) => {
@@ -43,7 +43,7 @@ export function drawPlan(plan: LotPlan, options: DrawOptions): PlanDraws {
 }
 
 /** Only the gold of all lines together, in the draws that `drawPlan` would give it but for the order of keys not named. */
-export function drawGold(plan: LotPlan, options: DrawOptions): Float64Array {
+export function drawGold(plan: LinesPlan, options: DrawOptions): Float64Array {
   const draw = createTermDrawer(options);
   const goldG = new Float64Array(options.draws);
   const one = new Float64Array(options.draws);
@@ -167,6 +167,7 @@ function sumOf(parts: readonly Float64Array[], draws: number): Float64Array {
   return sum;
 }
 
-function add(sum: Float64Array, part: Float64Array): void {
+/** Adds one array to another, draw by draw. */
+export function add(sum: Float64Array, part: Float64Array): void {
   for (let i = 0; i < sum.length; i += 1) sum[i] = (sum[i] as number) + (part[i] as number);
 }

@@ -1,9 +1,9 @@
 import type { Catalogue } from '../catalogue/catalogue.types.ts';
-import type { Driver, LineEstimate, LotInput, Quantiles } from '../types.ts';
-import { drawGold } from './draw-plan.ts';
-import type { Factor, LinePlan, LotPlan } from './lot-plan.types.ts';
+import type { Driver, LineEstimate, LineInput, LotInput, Quantiles } from '../types.ts';
+import { add, drawGold } from './draw-plan.ts';
+import type { Factor, LinePlan, LinesPlan } from './lot-plan.types.ts';
 import { improveLot, measurementOf, type Reading } from './measurement.ts';
-import { planLot } from './plan-lot.ts';
+import { planLine } from './plan-lot.ts';
 import { createQuantileFinder } from './quantile-finder.ts';
 import { varianceShares, type FactorShare } from './variance.ts';
 
@@ -15,7 +15,7 @@ export const driverDraws = 1021;
 export interface DriverInput {
   input: LotInput;
   catalogue: Catalogue;
-  plan: LotPlan;
+  plan: LinesPlan;
   seed: number;
   lines: readonly LineEstimate[];
   quantiles: Quantiles;
@@ -27,7 +27,7 @@ export function driversOf(given: DriverInput): Driver[] {
   const shares = largestShares(plan);
   if (shares.length === 0) return [];
   const nowG: [number, number] = [quantiles.p10, quantiles.p90];
-  const rangeOf = createRangeFinder(seed, keysOf(plan));
+  const rangeOf = createRangeFinder(plan, seed);
   const now = rangeOf(plan);
   const known = new Map<string, [number, number]>();
   return shares.map(({ factor, share }) => {
@@ -48,7 +48,7 @@ export function driversOf(given: DriverInput): Driver[] {
 }
 
 type Measured = Omit<DriverInput, 'quantiles' | 'seed'>;
-export type PlanAfter = (reading: Reading) => LotPlan;
+export type PlanAfter = (reading: Reading) => LinesPlan;
 
 /** For each question that the drivers ask, once: the lot as it would be planned after its answer. */
 export function plansByQuestion(given: Measured): Map<string, PlanAfter> {
@@ -60,7 +60,7 @@ export function plansByQuestion(given: Measured): Map<string, PlanAfter> {
   return plans;
 }
 
-function largestShares(plan: LotPlan): FactorShare[] {
+function largestShares(plan: LinesPlan): FactorShare[] {
   return varianceShares(plan)
     .filter(({ share }) => share >= leastShare)
     .slice(0, mostDrivers);
@@ -73,19 +73,38 @@ function measuring({ input, catalogue, plan, lines: estimates }: Measured, facto
   );
   const [first] = lines as [LinePlan];
   const measurement = measurementOf(factor, first.input);
-  const planAfter: PlanAfter = (reading) =>
-    planLot(improveLot(input, { measurement, lines, factor, estimates }, reading), catalogue);
+  const planAfter: PlanAfter = (reading) => {
+    const after = improveLot(input, { measurement, lines, factor, estimates }, reading);
+    return { lines: after.lines.map((line, i) => keptPlan(plan, line, i) ?? planLine(line, i, catalogue)) };
+  };
   const question = measurement.ask(lines.length === 1 ? first.label : `the ${first.materialClass.unit.many}`);
   return { question, lines, planAfter };
 }
 
-/** p10 and p90 of a plan's gold from a small sample; plans drawn with the same keys differ only where the plans do. */
-function createRangeFinder(seed: number, keys: readonly string[]): (plan: LotPlan) => [number, number] {
+function keptPlan({ lines }: LinesPlan, line: LineInput, index: number): LinePlan | null {
+  const plan = lines[index];
+  return plan?.input === line ? plan : null;
+}
+
+/**
+ * p10 and p90 of the gold from a small sample, for the plan itself and for plans that measurements made of it. All are drawn
+ * alike, so that they differ only where the plans do; lines left as they were are drawn once.
+ */
+function createRangeFinder(plan: LinesPlan, seed: number): (of: LinesPlan) => [number, number] {
   const find = createQuantileFinder(driverDraws);
-  return (plan) => find(drawGold(plan, { seed, draws: driverDraws, keys }), [0.1, 0.9]) as [number, number];
+  const options = { seed, draws: driverDraws, keys: keysOf(plan) };
+  const kept = new Map(plan.lines.map((line) => [line, drawGold({ lines: [line] }, options)]));
+  return ({ lines }) => {
+    const goldG = drawGold({ lines: lines.filter((line) => !kept.has(line)) }, options);
+    for (const line of lines) {
+      const part = kept.get(line);
+      if (part) add(goldG, part);
+    }
+    return find(goldG, [0.1, 0.9]) as [number, number];
+  };
 }
 
 /** The figures of a lot, each once. */
-export function keysOf(plan: LotPlan): string[] {
+export function keysOf(plan: LinesPlan): string[] {
   return [...new Set(plan.lines.flatMap(({ gold }) => gold.flatMap(({ factors }) => factors.map(({ key }) => key))))];
 }

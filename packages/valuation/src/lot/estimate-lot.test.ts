@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { catalogue20261 } from '../catalogue/catalogue-2026-1.ts';
+import { findClass } from '../catalogue/find-class.ts';
 import { quantileOf } from '../quantity/quantile.ts';
 import type { Estimate, LineInput } from '../types.ts';
 import { identityQuantity, massQuantity, thicknessQuantity } from './evidence.ts';
@@ -155,6 +156,24 @@ describe('evidence', () => {
     const stated = line({ massEvidence: 'stated', identityEvidence: 'stated' });
     expect(ratio(massQuantity(1000, line({ scaleResolutionG: 10 })))).toBeLessThan(ratio(massQuantity(1000, stated)));
     expect(ratio(identityQuantity(line()))).toBeLessThan(ratio(identityQuantity(stated)));
+  });
+});
+
+describe('a range of plating given by the seller', () => {
+  test('never widens the estimate, unless it is wider than the class has anyway, and then a warning says so', () => {
+    const um = fc.double({ min: 0.05, max: 4, noNaN: true });
+    fc.assert(
+      fc.property(withPlating, um, um, (classCode, a, b) => {
+        const plating = { kind: 'range', leastUm: Math.min(a, b), mostUm: Math.max(a, b) } as const;
+        const given = thicknessQuantity(plating);
+        const wider = estimate([{ classCode, plating }]).warnings.some(({ code }) => code === 'range-wider-than-class');
+        const component = findClass(catalogue20261, classCode).components.find(({ kind }) => kind === 'plating');
+        if (component?.kind !== 'plating') throw new Error(`${classCode} is not plated`);
+        const ratio = (of: typeof given) => quantileOf(of, 0.9) / quantileOf(of, 0.1);
+        expect(wider).toBe(ratio(given) > ratio(component.parameters.thicknessUm.quantity));
+      }),
+      { numRuns: 60 },
+    );
   });
 });
 

@@ -28,7 +28,10 @@ export interface LinePlan {
 }
 
 /** A lot as a sum of products, ready to be drawn or to be differentiated by parameter. */
-export interface LotPlan {
+export interface LinesPlan {
   lines: LinePlan[];
+}
+
+export interface LotPlan extends LinesPlan {
   warnings: Warning[];
 }

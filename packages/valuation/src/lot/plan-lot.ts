@@ -20,7 +20,8 @@ export function planLot(input: LotInput, catalogue: Catalogue): LotPlan {
   return { lines, warnings: lines.flatMap(warningsOf) };
 }
 
-function planLine(line: LineInput, index: number, catalogue: Catalogue): LinePlan {
+/** @throws {RangeError} naming a class that is not in the catalogue, or a figure out of its range */
+export function planLine(line: LineInput, index: number, catalogue: Catalogue): LinePlan {
   requireLine(line, index);
   const materialClass = findClass(catalogue, line.classCode);
   const amounts = planAmounts(line, materialClass);

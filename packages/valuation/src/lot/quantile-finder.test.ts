@@ -42,6 +42,13 @@ test('the median is the one simple-statistics finds', () => {
   );
 });
 
+test('nothing with a minus sign is nothing', () => {
+  expect(createQuantileFinder(3)(Float64Array.of(0, -0, 5e9), [0, 0.5, 1]).map((value) => value + 0)).toEqual([
+    0, 0, 5e9,
+  ]);
+  expect(createQuantileFinder(2)(Float64Array.of(5e-324, -0), [1])).toEqual([5e-324]);
+});
+
 test('one finder serves many arrays, a heap of equal values with outliers among them', () => {
   const find = createQuantileFinder(5000);
   const heap = new Float64Array(5000).fill(7);

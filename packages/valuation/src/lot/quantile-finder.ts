@@ -1,4 +1,5 @@
-const buckets = 4096;
+const bucketBits = 13;
+const buckets = 2 ** bucketBits;
 
 /** Quantiles of values in any order, one for each probability 0 … 1, by linear interpolation (type 7). */
 export type FindQuantiles = (values: Float64Array, probabilities: readonly number[]) => number[];
@@ -14,9 +15,8 @@ export function createQuantileFinder(length: number): FindQuantiles {
   const next = new Int32Array(buckets);
   const gathered = new Float64Array(length);
   return (values, probabilities) => {
-    fillKeys(keys, values);
     counts.fill(0);
-    for (let i = 0; i < length; i += 1) counts[keys[i] as number] = (counts[keys[i] as number] as number) + 1;
+    countKeys(keys, counts, values);
     const { places, runs } = locate(ranksOf(probabilities, length), counts, next);
     for (let i = 0; i < length; i += 1) {
       const at = next[keys[i] as number] as number;
@@ -72,22 +72,40 @@ function locate(ranks: readonly number[], counts: Int32Array, next: Int32Array) 
 }
 
 /**
- * For each value a bucket that never falls when the value rises. Where values span much, by the leading bits of the numbers,
- * which grow with their logarithm: draws of products of lognormals fill such buckets evenly.
+ * Gives each value a bucket that never falls when the value rises, and counts them. Where values span much, by the leading bits
+ * of the numbers, which grow with their logarithm: draws of products of lognormals fill such buckets evenly.
  */
-function fillKeys(keys: Uint16Array, values: Float64Array): void {
-  const { length } = values;
+function countKeys(keys: Uint16Array, counts: Int32Array, values: Float64Array): void {
   const [least, most] = limits(values);
-  if (least < 0 || most < 4 * least || most === least) {
-    const scale = most === least ? 0 : (buckets - 1) / (most - least);
-    for (let i = 0; i < length; i += 1) keys[i] = ((values[i] as number) - least) * scale;
-    return;
+  if (least < 0 || most < 4 * least || most === least) countEvenly(keys, counts, values, least, most);
+  else countByLeadingBits(keys, counts, values, least, most);
+}
+
+function countEvenly(keys: Uint16Array, counts: Int32Array, values: Float64Array, least: number, most: number): void {
+  const scale = most === least ? 0 : (buckets - 1) / (most - least);
+  for (let i = 0; i < values.length; i += 1) {
+    const key = (((values[i] as number) - least) * scale) | 0;
+    keys[i] = key;
+    counts[key] = (counts[key] as number) + 1;
   }
-  const bits = new Int32Array(values.buffer, values.byteOffset, 2 * length);
-  const leading = littleEndian ? 1 : 0;
+}
+
+function countByLeadingBits(
+  keys: Uint16Array,
+  counts: Int32Array,
+  values: Float64Array,
+  least: number,
+  most: number,
+): void {
+  const bits = new Int32Array(values.buffer, values.byteOffset, 2 * values.length);
   const from = leadingBits(least);
-  const scale = (buckets - 1) / (leadingBits(most) - from);
-  for (let i = 0; i < length; i += 1) keys[i] = ((bits[2 * i + leading] as number) - from) * scale;
+  const shift = Math.max(0, 32 - Math.clz32(leadingBits(most) - from) - bucketBits);
+  for (let i = 0, at = littleEndian ? 1 : 0; i < values.length; i += 1, at += 2) {
+    // No value here is negative but −0, whose sign is taken off.
+    const key = (((bits[at] as number) & withoutSign) - from) >> shift;
+    keys[i] = key;
+    counts[key] = (counts[key] as number) + 1;
+  }
 }
 
 function limits(values: Float64Array): [least: number, most: number] {
@@ -100,8 +118,9 @@ function limits(values: Float64Array): [least: number, most: number] {
   return [least, most];
 }
 
+const withoutSign = 0x7fffffff;
 const littleEndian = new Uint8Array(new Uint16Array([1]).buffer)[0] === 1;
 
 function leadingBits(value: number): number {
-  return new DataView(new Float64Array([value]).buffer).getInt32(littleEndian ? 4 : 0, littleEndian);
+  return new DataView(new Float64Array([value]).buffer).getInt32(littleEndian ? 4 : 0, littleEndian) & withoutSign;
 }

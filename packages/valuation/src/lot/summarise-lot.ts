@@ -9,7 +9,7 @@ import { meanAndVariance, medianOf, quantilesOf, spreadOf } from './quantiles.ts
 import type { LotDraws } from './simulate-lot.ts';
 
 /** Goes up whenever the same input could give other numbers. */
-export const modelVersion = '1.0';
+export const modelVersion = '1.1';
 
 const beads = Array.from({ length: 50 }, (_, i) => (i + 0.5) / 50);
 

@@ -1,5 +1,5 @@
 import { momentOf } from '../quantity/moment.ts';
-import type { Factor, LotPlan, Term } from './lot-plan.types.ts';
+import type { Factor, LinesPlan, Term } from './lot-plan.types.ts';
 
 export interface FactorShare {
   /** One of the factors with this key: the parameter and its quantity. */
@@ -12,7 +12,7 @@ export interface FactorShare {
  * without draws, since the gold is a sum of products of independent figures. Shares sum to at most 1; the rest is interaction.
  * Source: I. M. Sobol', Sensitivity estimates for nonlinear mathematical models, 1993.
  */
-export function varianceShares(plan: LotPlan): FactorShare[] {
+export function varianceShares(plan: LinesPlan): FactorShare[] {
   const figures = figuresOf(plan.lines.flatMap(({ gold }) => gold));
   const variance = totalVariance(figures);
   if (!(variance > 0)) return [];
