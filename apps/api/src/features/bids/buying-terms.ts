@@ -6,7 +6,7 @@ export const firstTerms: BuyingTerms = {
   recoveryYield: 0.93,
   accountableShare: 0.97,
   processingPerKgMinor: 250,
-  batchCostMinor: 12_000,
+  batchCostMinor: 4000,
   wantedChance: 0.8,
   marginShare: 0.08,
   rivals: 3,
