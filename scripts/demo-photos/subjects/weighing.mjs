@@ -12,7 +12,7 @@ const room = (wall, ground, horizon) =>
 const platform = (width, depth) =>
   svg`<ellipse cx="14" cy="84" rx="${width * 0.56}" ry="46" opacity=".45" filter="url(#blur-soft)"/><path d="M${-width / 2} 0L${-width / 2 + depth * 0.6} ${-depth}H${width / 2 - depth * 0.6}L${width / 2} 0Z" fill="url(#platform)"/><path d="M${-width / 2} 0H${width / 2}V44H${-width / 2}Z" fill="url(#steel)"/><path d="M${-width / 2} 0H${width / 2}V5H${-width / 2}Z" fill="#f4f6f6"/><path d="M${-width / 2 + 30} 44H${width / 2 - 30}V72H${-width / 2 + 30}Z" fill="url(#rubber)"/>${[-1, 1].map((end) => svg`<rect x="${end * width * 0.42 - 34}" y="64" width="68" height="22" rx="8" fill="#17191a"/>`)}`;
 
-/** A crate of memory modules on a bench scale. */
+/** A crate of memory modules on a bench scale. Its display is left empty: the seed writes each lot's own reading on it. */
 export function memoryCrateScale() {
   const random = createRandom(21);
   const crate = crateFront({ width: 880, height: 400 });
@@ -27,7 +27,7 @@ export function memoryCrateScale() {
       lift: 'low',
     });
   });
-  const drawing = svg`${room('concrete', 'darkSteel', 700)}${at(800, 845, platform(1240, 150))}<ellipse cx="810" cy="790" rx="450" ry="34" opacity=".5" filter="url(#blur-soft)"/>${at(800, 390, crate.inside)}${modules}${at(800, 390, crate.front)}${at(800, 1015, scaleHead('88.74', { width: 500 }))}`;
+  const drawing = svg`${room('concrete', 'darkSteel', 700)}${at(800, 845, platform(1240, 150))}<ellipse cx="810" cy="790" rx="450" ry="34" opacity=".5" filter="url(#blur-soft)"/>${at(800, 390, crate.inside)}${modules}${at(800, 390, crate.front)}${at(800, 1015, scaleHead('', { width: 500 }))}`;
   return { drawing, view: 'front', seed: 21 };
 }
 
@@ -64,21 +64,21 @@ function sack() {
   );
   const round = svg`<path d="${sackOutline}" fill="none" stroke="#2e2714" stroke-opacity=".8" stroke-width="110" filter="url(#blur-wide)"/>`;
   const tie = svg`<path d="M-72 -336Q0 -312 78 -336" fill="none" stroke="#262321" stroke-width="15" stroke-linecap="round"/><path d="M-70 -348Q0 -326 76 -348" fill="none" stroke="#3b3733" stroke-width="9"/>`;
-  const tag = svg`<g transform="translate(118 -232) rotate(9)"><path d="M-6 -96L2 -40" stroke="#3b3733" stroke-width="4"/><path d="${rectanglePath(150, 92, 10)}" fill="#000" opacity=".3" transform="translate(5 9)"/><path d="${rectanglePath(150, 92, 10)}" fill="#e8dcb9"/>${mark(0, -14, 22, 'MIXED', '#32302b')}${mark(0, 14, 22, 'BAG 3 / 7', '#32302b')}<path d="M-56 30h112" stroke="#86795a" stroke-width="2"/></g>`;
+  const tag = svg`<g transform="translate(118 -232) rotate(9)"><path d="M-6 -96L2 -40" stroke="#3b3733" stroke-width="4"/><path d="${rectanglePath(150, 92, 10)}" fill="#000" opacity=".3" transform="translate(5 9)"/><path d="${rectanglePath(150, 92, 10)}" fill="#e8dcb9"/><path d="M-56 -14h112M-56 8h112M-56 30h112" stroke="#86795a" stroke-width="2"/></g>`;
   return svg`<clipPath id="sack"><path d="${sackOutline}"/></clipPath><path d="${sackOutline}" fill="url(#weave)"/><g clip-path="url(#sack)">${weave}<g filter="url(#blur-soft)">${bulges}${folds}</g>${round}</g>${tie}${tag}`;
 }
 
-/** A sack on a floor scale at the weigh-in, the head on its post. */
+/** A sack on a floor scale, the head on its post. Its display is left empty: the seed writes each lot's own reading on it. */
 export function sackFloorScale() {
-  const drawing = svg`${room('paper', 'concrete', 520)}<rect x="1176" y="300" width="44" height="600" fill="url(#tin)"/>${at(760, 1010, platform(1180, 210))}<ellipse cx="670" cy="945" rx="370" ry="40" opacity=".55" filter="url(#blur-soft)"/>${svg`<g transform="translate(640 548) scale(.94)">${sack()}</g>`}${at(1250, 250, scaleHead('31.46', { width: 520 }))}`;
+  const drawing = svg`${room('paper', 'concrete', 520)}<rect x="1176" y="300" width="44" height="600" fill="url(#tin)"/>${at(760, 1010, platform(1180, 210))}<ellipse cx="670" cy="945" rx="370" ry="40" opacity=".55" filter="url(#blur-soft)"/>${svg`<g transform="translate(640 548) scale(.94)">${sack()}</g>`}${at(1250, 250, scaleHead('', { width: 520 }))}`;
   return { drawing, view: 'front', seed: 22 };
 }
 
 const ticketLines = [
   ['Ticket', '004 817'],
-  ['Date', '12 MAR  10:42'],
+  ['Counter', '2'],
   ['Scale', 'No. 6  60 kg × 10 g'],
-  ['Last check', '03 FEB'],
+  ['Seal', '118'],
 ];
 
 /** A weigh ticket of an invented public scale, on a clipboard. */

@@ -7,7 +7,8 @@ import { originalKey, sizeKey } from '../features/photos/photo-keys.ts';
 import { toPhotoView } from '../features/photos/photos.reads.ts';
 import { photoSizes, processPhoto, type PhotoSize, type ProcessedPhoto } from '../features/photos/process-photo.ts';
 import type { World } from '../platform/world.ts';
-import type { PhotoPlan } from './lot-plan.ts';
+import type { Picture, PhotoPlan } from './lot-plan.ts';
+import { isScalePicture, readingOf, showReading } from './scale-reading.ts';
 
 /** The rendered photos of the demo, without their ending. */
 export const photoFiles = [
@@ -42,11 +43,11 @@ export const photoFiles = [
 ] as const;
 export type PhotoFile = (typeof photoFiles)[number];
 
-interface Hanging extends PhotoPlan {
+type Hanging = PhotoPlan & {
   ownerId: string;
   of: { lotId: string } | { dealId: string };
   position: number;
-}
+};
 
 interface Print {
   original: Buffer;
@@ -58,21 +59,32 @@ const atOnce = 2;
 
 /**
  * Photos for the demo's lots and deals. Each file goes once through what every photo goes through, in the background from the
- * beginning; the bytes serve all lots that show it.
+ * beginning; the bytes serve all lots that show it. The picture of a scale is made for each reading, when it is first wanted.
  */
 export function openAlbum({ db, files }: Pick<World, 'db' | 'files'>, folder: string) {
-  const prints = new Map<PhotoFile, Promise<Print>>();
+  const prints = new Map<string, Promise<Print>>();
   const lanes: Promise<unknown>[] = Array.from({ length: atOnce }, () => Promise.resolve());
-  for (const [index, file] of photoFiles.entries()) {
-    const print = lanes[index % atOnce]!.then(() => develop(join(folder, `${file}.jpg`)));
+  const pathOf = (file: PhotoFile) => join(folder, `${file}.jpg`);
+  for (const [index, file] of photoFiles.filter((one) => !isScalePicture(one)).entries()) {
+    const print = lanes[index % atOnce]!.then(() => readFile(pathOf(file))).then(develop);
     prints.set(file, print);
     // Whoever needs the photo hears of its failure; the next in the lane goes on.
     lanes[index % atOnce] = print.catch(() => {});
   }
 
+  const printOf = (picture: Picture): Promise<Print> => {
+    if (!('weighing' in picture)) return prints.get(picture.file)!;
+    const { file } = picture;
+    const reading = readingOf(picture.weighing);
+    const key = `${file} ${reading}`;
+    const print = prints.get(key) ?? showReading(pathOf(file), file, reading).then(develop);
+    prints.set(key, print);
+    return print;
+  };
+
   return {
-    async hang({ file, ownerId, of, slot, position, description }: Hanging): Promise<PhotoView> {
-      const { original, photo } = await prints.get(file)!;
+    async hang({ ownerId, of, slot, position, description, ...picture }: Hanging): Promise<PhotoView> {
+      const { original, photo } = await printOf(picture);
       const { width, height, colour } = photo;
       const id = randomUUID();
       await Promise.all([
@@ -99,7 +111,4 @@ export function openAlbum({ db, files }: Pick<World, 'db' | 'files'>, folder: st
 }
 export type Album = ReturnType<typeof openAlbum>;
 
-const develop = async (path: string): Promise<Print> => ({
-  original: await readFile(path),
-  photo: await processPhoto(path, 'jpeg'),
-});
+const develop = async (original: Buffer): Promise<Print> => ({ original, photo: await processPhoto(original, 'jpeg') });

@@ -1,12 +1,12 @@
 import { randomUUID } from 'node:crypto';
 import type { LineDraft, LotDraft, PhotoSlot } from '@lydite/contracts';
 import type { PhotoFile } from './album.ts';
+import type { ScalePicture, Weighing } from './scale-reading.ts';
 
-export interface PhotoPlan {
-  file: PhotoFile;
-  slot: PhotoSlot;
-  description: string;
-}
+/** What a photo shows; the picture of a scale also what was on it. */
+export type Picture = { file: Exclude<PhotoFile, ScalePicture> } | { file: ScalePicture; weighing: Weighing };
+
+export type PhotoPlan = Picture & { slot: PhotoSlot; description: string };
 
 /** A lot as its seller describes it. The place is the seller's. */
 export interface LotPlan {
@@ -59,6 +59,29 @@ export const counted = (pieces: number): Facts => ({ pieces, countEvidence: 'cou
 export const countedOnPhoto = (pieces: number): Facts => ({ pieces, countEvidence: 'counted-on-photo' });
 export const about = (pieces: number): Facts => ({ pieces, countEvidence: 'stated' });
 export const inspected: Facts = { identityEvidence: 'inspected' };
+
+interface OnScale {
+  netKg: number;
+  tareKg: number;
+  resolutionG: number;
+}
+
+/** A picture of a scale on which so much lies. */
+export const onScale = (file: ScalePicture, { netKg, tareKg, resolutionG }: OnScale): Picture => ({
+  file,
+  weighing: { netG: Math.round(netKg * 1000), tareG: Math.round(tareKg * 1000), resolutionG },
+});
+export const sackOnScale = (on: OnScale, description: string): PhotoPlan => ({
+  ...onScale('sack-floor-scale', on),
+  slot: 'on-scale',
+  description,
+});
+/** Memory in the one kind of crate that it is kept in. */
+export const memoryOnScale = (netKg: number): PhotoPlan => ({
+  ...onScale('memory-crate-scale', { netKg, tareKg: 1.24, resolutionG: 10 }),
+  slot: 'on-scale',
+  description: 'The crate on the scale',
+});
 
 const minor = (dollars: number): number => Math.round(dollars * 100);
 

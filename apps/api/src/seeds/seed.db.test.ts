@@ -59,6 +59,14 @@ test('every material class of the catalogue is on a lot, and every photo is show
   expect(shown[0]!.n).toBeGreaterThan(photoFiles.length / 2);
 });
 
+test('the ticket of the public scale hangs at the one weigh-in whose masses it names', async () => {
+  const masses: unknown[] = await market.db.query(
+    `select w.gross_g::float as gross, w.tare_g::float as tare, w.net_g::float as net
+       from photos p join weigh_ins w on w.deal_id = p.deal_id where p.description = 'Ticket of the public scale'`,
+  );
+  expect(masses).toEqual([{ gross: 31_460, tare: 380, net: 31_080 }]);
+});
+
 test('the market runs on real time again, and nothing in it lies in the future', async () => {
   const rows: { off: number; late: number; alarms: number }[] = await market.db.query(
     `select extract(epoch from market_now() - clock_timestamp())::int as off,

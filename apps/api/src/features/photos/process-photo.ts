@@ -30,13 +30,13 @@ interface Pixels {
 }
 
 /**
- * Decodes a photo once, turns it upright and encodes it anew as WebP in three sizes, never enlarged. Nothing of the sender's
- * file but its pixels is left: no place, no time, no camera.
+ * Decodes a photo, given by its path or its bytes, once, turns it upright and encodes it anew as WebP in three sizes, never
+ * enlarged. Nothing of the sender's file but its pixels is left: no place, no time, no camera.
  * @throws AppError photo.too_many_pixels, photo.unreadable
  */
-export async function processPhoto(path: string, kind: PhotoKind): Promise<ProcessedPhoto> {
-  await assertSize(path, kind);
-  const pixels = await decode(path);
+export async function processPhoto(source: string | Buffer, kind: PhotoKind): Promise<ProcessedPhoto> {
+  await assertSize(source, kind);
+  const pixels = await decode(source);
   const { data, raw } = pixels;
   const [list, page, zoom] = [
     await encode(pixels, photoSizes.list),
@@ -48,9 +48,9 @@ export async function processPhoto(path: string, kind: PhotoKind): Promise<Proce
   return { files: { list, page, zoom }, width: raw.width, height: raw.height, colour: `#${hex}` };
 }
 
-async function assertSize(path: string, kind: PhotoKind): Promise<void> {
+async function assertSize(source: string | Buffer, kind: PhotoKind): Promise<void> {
   // Without a limit here, since only the header is read: the answer can then say how large the photo is.
-  const header = await sharp(path, { limitInputPixels: false }).metadata().catch(refuseUnreadable);
+  const header = await sharp(source, { limitInputPixels: false }).metadata().catch(refuseUnreadable);
   if (header.format !== kind) refuseUnreadable();
   const megapixels = (header.width * header.height) / 1_000_000;
   if (header.width * header.height > mostPixels)
@@ -60,8 +60,8 @@ async function assertSize(path: string, kind: PhotoKind): Promise<void> {
     );
 }
 
-async function decode(path: string): Promise<Pixels> {
-  const photo = sharp(path, { limitInputPixels: mostPixels, failOn: 'warning', pages: 1 }).timeout({
+async function decode(source: string | Buffer): Promise<Pixels> {
+  const photo = sharp(source, { limitInputPixels: mostPixels, failOn: 'warning', pages: 1 }).timeout({
     seconds: decodeSeconds,
   });
   const { data, info } = await shrink(photo.autoOrient(), photoSizes.zoom)

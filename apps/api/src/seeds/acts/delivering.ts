@@ -1,3 +1,4 @@
+import { onScale, type Picture } from '../lot-plan.ts';
 import type { FirmKey } from '../people.ts';
 import type { Stage } from '../stage.ts';
 import type { Deal } from './buying.ts';
@@ -21,16 +22,21 @@ interface Scale {
   resolutionG: number;
   serial: string;
   note?: string;
+  /** What the photo shows: a sack on the scale, if nothing else. The ticket of the public scale names masses of its own. */
+  picture?: 'memory-crate-scale' | 'sack-floor-scale' | 'weigh-ticket';
 }
 
-/** The buyer weighs in, with a photo of the ticket. */
+const pictureOf = ({ picture = 'sack-floor-scale', ...on }: Scale): Picture =>
+  picture === 'weigh-ticket' ? { file: picture } : onScale(picture, on);
+
+/** The buyer weighs in, with a photo of the scale or its ticket. */
 export async function weighIn(stage: Stage, step: Step, scale: Scale) {
   const { netKg, tareKg, resolutionG, serial, note = '' } = scale;
   const tareG = Math.round(tareKg * 1000);
   const photo = await stage.album.hang({
-    file: 'weigh-ticket',
+    ...pictureOf(scale),
     slot: 'on-scale',
-    description: 'Weigh ticket',
+    description: scale.picture === 'weigh-ticket' ? 'Ticket of the public scale' : 'On the scale',
     ownerId: stage.people[step.by].id,
     of: { dealId: step.deal.id },
     position: 0,

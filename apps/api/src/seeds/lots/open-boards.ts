@@ -7,6 +7,7 @@ import {
   counted,
   countedOnPhoto,
   line,
+  sackOnScale,
   sentFor,
   statedKg,
   weighedKg,
@@ -19,17 +20,17 @@ export const openBoards = ({ fullHour, ahead }: Calendar): OpenLot[] => [
     seller: 'clearance',
     closes: ahead(3, 17),
     bids: [
-      ['works', 210],
-      ['reclaim', 260],
+      ['works', 170],
+      ['reclaim', 210],
     ],
     plan: {
       title: 'Expansion cards, mixed, brackets off',
       description:
-        'Sound, network and graphics cards from office machines, brackets and coolers taken off. Roughly a third have short contacts. Mass as read from the label of the crate.',
+        'Sound, network and graphics cards from office machines, brackets and coolers taken off. Roughly a third have short contacts. The mass of both sacks is as the haulier wrote it down.',
       lines: [line('expansion-cards', 'Expansion cards, mixed', statedKg(28), about(210))],
       photos: [
         { file: 'expansion-cards', slot: 'whole', description: 'Part of the lot spread on the mat' },
-        { file: 'sack-floor-scale', slot: 'on-scale', description: 'One of the sacks on the floor scale' },
+        sackOnScale({ netKg: 14.3, tareKg: 0.4, resolutionG: 100 }, 'One of two sacks on the floor scale'),
       ],
       sale: bidsFrom(150, { days: 7 }),
       delivery: sentFor(24),
@@ -39,20 +40,17 @@ export const openBoards = ({ fullHour, ahead }: Calendar): OpenLot[] => [
     seller: 'disposal',
     closes: fullHour(6),
     bids: [
-      ['refining', 950],
-      ['recovery', 1250],
-      ['trading', 1400],
+      ['refining', 850],
+      ['recovery', 1080],
+      ['trading', 1250],
     ],
     plan: {
       title: 'Two-socket server boards, sockets in place',
       description:
         'From one hosting hall, all of two makes. Processors, memory and coolers are out, sockets and shields are on. Batteries are out. Stacked on one pallet.',
       lines: [line('server-boards', 'Two-socket server boards', weighedKg(64.5, 100), counted(34))],
-      photos: [
-        { file: 'server-boards', slot: 'whole', description: 'Two boards as they lie on the pallet' },
-        { file: 'weigh-ticket', slot: 'on-scale', description: 'Ticket of the floor scale' },
-      ],
-      sale: bidsFrom(800, { days: 10, reserve: 1500 }),
+      photos: [{ file: 'server-boards', slot: 'whole', description: 'Two boards as they lie on the pallet' }],
+      sale: bidsFrom(700, { days: 10, reserve: 1000 }),
       delivery: sentFor(62),
     },
   },
@@ -60,9 +58,9 @@ export const openBoards = ({ fullHour, ahead }: Calendar): OpenLot[] => [
     seller: 'disposal',
     closes: ahead(2, 11),
     bids: [
-      ['reclaim', 900],
-      ['refining', 1320],
-      ['recovery', 1150],
+      ['reclaim', 720],
+      ['refining', 860],
+      ['recovery', 960],
     ],
     plan: {
       title: 'Switch and router boards, shields on',
@@ -70,7 +68,7 @@ export const openBoards = ({ fullHour, ahead }: Calendar): OpenLot[] => [
         'Boards out of rack switches and routers, 24 and 48 ports, shields and jacks on, no supplies among them. Heat sinks removed where they were clipped.',
       lines: [line('network-boards', 'Switch and router boards', weighedKg(85, 100), countedOnPhoto(96))],
       photos: [{ file: 'network-boards', slot: 'whole', description: 'The upper layer of the crate' }],
-      sale: bidsFrom(700, { days: 8 }),
+      sale: bidsFrom(600, { days: 8 }),
       delivery: sentFor(70),
     },
   },
@@ -93,11 +91,11 @@ export const openBoards = ({ fullHour, ahead }: Calendar): OpenLot[] => [
     seller: 'repairs',
     closes: ahead(3, 12),
     bids: [
-      ['works', 260],
-      ['recovery', 310],
-      ['trading', 400],
-      ['reclaim', 430],
-      ['trading', 460],
+      ['works', 190],
+      ['recovery', 265],
+      ['trading', 290],
+      ['reclaim', 320],
+      ['trading', 350],
     ],
     plan: {
       title: 'Phone boards without cells, mixed years',
@@ -106,9 +104,9 @@ export const openBoards = ({ fullHour, ahead }: Calendar): OpenLot[] => [
       lines: [line('phone-boards', 'Phone boards, keypad and touch', weighedKg(9.6, 10), about(450))],
       photos: [
         { file: 'phone-boards', slot: 'whole', description: 'A loose layer of the lot' },
-        { file: 'weigh-ticket', slot: 'on-scale', description: 'Ticket of the bench scale' },
+        sackOnScale({ netKg: 9.6, tareKg: 0.21, resolutionG: 10 }, 'The sack on the scale'),
       ],
-      sale: bidsFrom(200, { days: 7, reserve: 520 }),
+      sale: bidsFrom(150, { days: 7, reserve: 420 }),
       delivery: sentFor(14),
     },
   },
@@ -121,7 +119,7 @@ export const openBoards = ({ fullHour, ahead }: Calendar): OpenLot[] => [
       description: 'Unscrewed by hand, nothing broken off. Counted into bags of fifty.',
       lines: [line('drive-boards', 'Hard-drive boards', weighedKg(6.3, 10), counted(450))],
       photos: [{ file: 'hard-drive-boards', slot: 'whole', description: 'One bag emptied on the bench' }],
-      sale: asking(195, { days: 12 }),
+      sale: asking(125, { days: 12 }),
       delivery: sentFor(12),
     },
   },
@@ -141,7 +139,7 @@ export const openBoards = ({ fullHour, ahead }: Calendar): OpenLot[] => [
   {
     seller: 'dismantling',
     closes: ahead(4, 10),
-    bids: [['recovery', 300]],
+    bids: [['recovery', 310]],
     plan: {
       title: 'Game console boards, three generations',
       description:
@@ -156,9 +154,9 @@ export const openBoards = ({ fullHour, ahead }: Calendar): OpenLot[] => [
     seller: 'clearance',
     closes: ahead(5, 16),
     bids: [
-      ['reclaim', 1200],
-      ['works', 1300],
-      ['refining', 1850],
+      ['reclaim', 820],
+      ['works', 940],
+      ['refining', 1250],
     ],
     plan: {
       title: 'Unsorted boards, two crates',
@@ -167,9 +165,12 @@ export const openBoards = ({ fullHour, ahead }: Calendar): OpenLot[] => [
       lines: [line('mixed-boards', 'Boards, unsorted', statedKg(310))],
       photos: [
         { file: 'mixed-boards-crate', slot: 'whole', description: 'Looking down into the first crate' },
-        { file: 'sack-floor-scale', slot: 'other', description: 'The last sack, not in the crates' },
+        {
+          ...sackOnScale({ netKg: 22.6, tareKg: 0.4, resolutionG: 100 }, 'The last sack, part of the mass'),
+          slot: 'other',
+        },
       ],
-      sale: bidsFrom(900, { days: 12 }),
+      sale: bidsFrom(600, { days: 12 }),
       delivery: collected('Monday to Friday, 8:00 to 15:30, ramp and fork-lift'),
     },
   },
@@ -189,9 +190,10 @@ export const openBoards = ({ fullHour, ahead }: Calendar): OpenLot[] => [
       photos: [
         { file: 'desktop-main-boards', slot: 'whole', description: 'Three of the main boards' },
         { file: 'expansion-cards', slot: 'other', description: 'The cards' },
+        sackOnScale({ netKg: 9.5, tareKg: 0.4, resolutionG: 100 }, 'The sack with the cards'),
         { file: 'hard-drive-boards', slot: 'other', description: 'Drive boards, as in the third sack' },
       ],
-      sale: asking(1050, { days: 13 }),
+      sale: asking(760, { days: 13 }),
       delivery: sentFor(48),
     },
   },

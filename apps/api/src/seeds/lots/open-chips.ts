@@ -8,10 +8,10 @@ export const openChips = ({ ahead }: Calendar): OpenLot[] => [
     seller: 'collectors',
     closes: ahead(7, 19),
     bids: [
-      ['trading', 620],
-      ['refining', 760],
-      ['recovery', 850],
-      ['refining', 900],
+      ['trading', 560],
+      ['refining', 610],
+      ['recovery', 660],
+      ['refining', 720],
     ],
     plan: {
       title: 'Ceramic processors, gold lids, pinned',
@@ -22,11 +22,8 @@ export const openChips = ({ ahead }: Calendar): OpenLot[] => [
           contactsPerPiece: 273,
         }),
       ],
-      photos: [
-        { file: 'ceramic-processors', slot: 'whole', description: 'Lids and pins in turn' },
-        { file: 'weigh-ticket', slot: 'on-scale', description: 'Ticket of the bench scale' },
-      ],
-      sale: bidsFrom(500, { days: 12, reserve: 800 }),
+      photos: [{ file: 'ceramic-processors', slot: 'whole', description: 'Lids and pins in turn' }],
+      sale: bidsFrom(450, { days: 12, reserve: 640 }),
       delivery: sentFor(14),
       declarations: {
         mercuryOrBeryllium: 'present',
@@ -38,8 +35,9 @@ export const openChips = ({ ahead }: Calendar): OpenLot[] => [
     seller: 'repairs',
     closes: ahead(2, 18),
     bids: [
-      ['reclaim', 240],
-      ['works', 300],
+      ['reclaim', 220],
+      ['recovery', 265],
+      ['works', 240],
     ],
     plan: {
       title: 'Fibre processors, pinned, no coolers',
@@ -59,7 +57,7 @@ export const openChips = ({ ahead }: Calendar): OpenLot[] => [
       description: 'Processors with pads instead of pins, lids on, paste wiped. Sorted by nothing but size.',
       lines: [line('fibre-processors-land', 'Land-pad processors', weighedKg(11.2, 10), countedOnPhoto(430))],
       photos: [{ file: 'fibre-processors-land', slot: 'whole', description: 'Lids and pads' }],
-      sale: asking(185, { days: 14 }),
+      sale: asking(85, { days: 14 }),
       delivery: sentFor(14),
     },
   },
@@ -68,7 +66,8 @@ export const openChips = ({ ahead }: Calendar): OpenLot[] => [
     closes: ahead(3, 19),
     bids: [
       ['works', 560],
-      ['refining', 700],
+      ['refining', 720],
+      ['recovery', 760],
     ],
     plan: {
       title: 'Ball-grid packages, wire-bonded, pulled whole',
@@ -93,11 +92,8 @@ export const openChips = ({ ahead }: Calendar): OpenLot[] => [
           assay: { gradeGPerT: 7400, relativeSd: 0.08 },
         }),
       ],
-      photos: [
-        { file: 'package-tops-dish', slot: 'whole', description: 'Part of the lot in a dish' },
-        { file: 'weigh-ticket', slot: 'on-scale', description: 'Ticket of the bench scale' },
-      ],
-      sale: asking(860, { days: 14 }),
+      photos: [{ file: 'package-tops-dish', slot: 'whole', description: 'Part of the lot in a dish' }],
+      sale: asking(770, { days: 14 }),
       delivery: sentFor(8),
     },
   },
@@ -106,8 +102,8 @@ export const openChips = ({ ahead }: Calendar): OpenLot[] => [
     closes: ahead(4, 21),
     bids: [
       ['reclaim', 220],
-      ['recovery', 340],
-      ['trading', 380],
+      ['recovery', 330],
+      ['trading', 300],
     ],
     plan: {
       title: 'Leaded plastic chips, old and new mixed',

@@ -1,5 +1,16 @@
 import type { OpenLot } from '../stories/open-lots.ts';
-import { asking, bidsFrom, counted, inspected, line, sentFor, statedKg, weighedKg } from '../lot-plan.ts';
+import {
+  asking,
+  bidsFrom,
+  counted,
+  inspected,
+  line,
+  memoryOnScale,
+  sackOnScale,
+  sentFor,
+  statedKg,
+  weighedKg,
+} from '../lot-plan.ts';
 import type { Calendar } from '../time.ts';
 
 /** Contacts, memory, pins and connectors that are on the market now. */
@@ -10,8 +21,8 @@ export const openContacts = ({ fullHour, ahead }: Calendar): OpenLot[] => [
     bids: [
       ['works', 520],
       ['recovery', 640],
-      ['refining', 760],
-      ['recovery', 730],
+      ['refining', 730],
+      ['recovery', 690],
     ],
     plan: {
       title: 'Trimmed edge contacts, cut close',
@@ -26,7 +37,6 @@ export const openContacts = ({ fullHour, ahead }: Calendar): OpenLot[] => [
       photos: [
         { file: 'edge-contacts-heap', slot: 'whole', description: 'The whole lot with a rule in front' },
         { file: 'edge-contacts-close', slot: 'one-piece', description: 'Width and wear from near' },
-        { file: 'weigh-ticket', slot: 'on-scale', description: 'Ticket of the bench scale' },
       ],
       sale: bidsFrom(450, { days: 7, reserve: 600 }),
       delivery: sentFor(9),
@@ -37,8 +47,8 @@ export const openContacts = ({ fullHour, ahead }: Calendar): OpenLot[] => [
     closes: ahead(1, 16),
     bids: [
       ['reclaim', 620],
-      ['refining', 700],
-      ['recovery', 840],
+      ['refining', 780],
+      ['recovery', 870],
     ],
     plan: {
       title: 'Server memory, DDR3 registered, double-sided',
@@ -52,7 +62,7 @@ export const openContacts = ({ fullHour, ahead }: Calendar): OpenLot[] => [
       photos: [
         { file: 'memory-rows', slot: 'whole', description: 'Thirty of the modules laid out' },
         { file: 'memory-close', slot: 'markings', description: 'One module, contacts and label' },
-        { file: 'memory-crate-scale', slot: 'on-scale', description: 'The crate on the scale' },
+        memoryOnScale(12.4),
       ],
       sale: bidsFrom(400, { days: 7, reserve: 800 }),
       delivery: sentFor(18),
@@ -63,7 +73,7 @@ export const openContacts = ({ fullHour, ahead }: Calendar): OpenLot[] => [
     closes: ahead(6, 20),
     bids: [
       ['trading', 420],
-      ['recovery', 510],
+      ['recovery', 540],
     ],
     plan: {
       title: 'Desktop memory with a bag of trimmed contacts',
@@ -85,8 +95,9 @@ export const openContacts = ({ fullHour, ahead }: Calendar): OpenLot[] => [
     seller: 'collectors',
     closes: ahead(4, 15),
     bids: [
-      ['refining', 520],
-      ['reclaim', 610],
+      ['refining', 620],
+      ['recovery', 740],
+      ['reclaim', 820],
     ],
     plan: {
       title: 'Contact pins, plated all over',
@@ -111,7 +122,10 @@ export const openContacts = ({ fullHour, ahead }: Calendar): OpenLot[] => [
       description:
         'Slots, blocks and shells, plastic on. Gold only at the mating end of the contacts, as far as we can see.',
       lines: [line('connectors', 'Slots and plug blocks', weighedKg(14.6, 100))],
-      photos: [{ file: 'connectors-whole', slot: 'whole', description: 'A spread of what is in the sack' }],
+      photos: [
+        { file: 'connectors-whole', slot: 'whole', description: 'A spread of what is in the sack' },
+        sackOnScale({ netKg: 14.6, tareKg: 0.4, resolutionG: 100 }, 'The sack on the floor scale'),
+      ],
       sale: bidsFrom(100, { days: 9 }),
       delivery: sentFor(16),
     },

@@ -1,4 +1,16 @@
-import { about, bidsFrom, collected, counted, line, sentFor, statedKg, weighedKg, type LotPlan } from '../lot-plan.ts';
+import {
+  about,
+  bidsFrom,
+  collected,
+  counted,
+  line,
+  memoryOnScale,
+  sackOnScale,
+  sentFor,
+  statedKg,
+  weighedKg,
+  type LotPlan,
+} from '../lot-plan.ts';
 
 /** Lots that ended without a sale, and drafts. */
 export const unsold = {
@@ -8,7 +20,7 @@ export const unsold = {
     lines: [line('low-grade-boards', 'Supply and monitor boards', weighedKg(220, 500))],
     photos: [
       { file: 'power-boards', slot: 'whole', description: 'Some of the boards' },
-      { file: 'sack-floor-scale', slot: 'on-scale', description: 'One of the sacks' },
+      sackOnScale({ netKg: 27.5, tareKg: 0.5, resolutionG: 500 }, 'One of eight sacks'),
     ],
     sale: bidsFrom(150, { days: 7, reserve: 400 }),
     delivery: collected('By appointment, weekdays'),
@@ -34,10 +46,7 @@ export const unsold = {
     title: 'Desktop memory, single-sided',
     description: 'Desktop modules, single-sided, sorted by contacts: all full length.',
     lines: [line('memory-modules', 'Desktop modules, single-sided', weighedKg(7.3, 10), counted(430))],
-    photos: [
-      { file: 'memory-rows', slot: 'whole', description: 'Part of the modules laid out' },
-      { file: 'memory-crate-scale', slot: 'on-scale', description: 'The crate on the scale' },
-    ],
+    photos: [{ file: 'memory-rows', slot: 'whole', description: 'Part of the modules laid out' }, memoryOnScale(7.3)],
     sale: bidsFrom(250, { days: 7, reserve: 400 }),
     delivery: sentFor(14),
     declarations: { rightToSell: false, batteries: null, mercuryOrBeryllium: null },

@@ -52,7 +52,7 @@ export async function* buyingTerms(stage: Stage): Story {
     recoveryYield: 0.94,
     accountableShare: 0.97,
     processingPerKgMinor: 320,
-    batchCostMinor: 14_500,
+    batchCostMinor: 3500,
     wantedChance: 0.8,
     marginShare: 0.1,
     rivals: 3,

@@ -36,42 +36,44 @@ export async function* settledInOrder(stage: Stage): Story {
   yield closes.plus({ days: 4, hours: 16, minutes: 51 });
   await receive(stage, { by: 'recovery', deal });
   yield closes.plus({ days: 4, hours: 18, minutes: 26 });
-  await weighIn(stage, { by: 'recovery', deal }, { netKg: 15.09, tareKg: 1.24, resolutionG: 10, serial: 'B-204' });
+  const crate = { netKg: 15.09, tareKg: 1.24, picture: 'memory-crate-scale' } as const;
+  await weighIn(stage, { by: 'recovery', deal }, { ...crate, resolutionG: 10, serial: 'B-204' });
   yield closes.plus({ days: 5, hours: 15, minutes: 33 });
   await countersign(stage, { by: 'repairs', deal });
   yield closes.plus({ days: 5, hours: 20, minutes: 4 });
   await accept(stage, { by: 'recovery', deal });
 }
 
-/** Nobody says anything after the weigh-in: the deadlines settle it. */
+/** Weighed on the public scale of the buyer's town. Nobody says anything after that: the deadlines settle it. */
 export async function* settledBySilence(stage: Stage): Story {
   const closes = stage.calendar.ago(27, '17:00');
   const bids = [
-    ['trading', 820],
-    ['reclaim', 1150],
-    ['refining', 1080],
+    ['reclaim', 330],
+    ['trading', 420],
+    ['refining', 380],
   ] as const;
   const deal = yield* sell(stage, { seller: 'clearance', plan: sold.officeBoards, closes, bids });
   yield closes.plus({ hours: 17, minutes: 38 });
   // The first card is declined, the second is good.
-  await pay(stage, { buyer: 'reclaim', deal, method: 'pm_card_chargeDeclinedInsufficientFunds' });
+  await pay(stage, { buyer: 'trading', deal, method: 'pm_card_chargeDeclinedInsufficientFunds' });
   yield closes.plus({ hours: 18, minutes: 13 });
-  await pay(stage, { buyer: 'reclaim', deal });
+  await pay(stage, { buyer: 'trading', deal });
   yield closes.plus({ days: 1, hours: 16, minutes: 56 });
   await dispatch(stage, { by: 'clearance', deal }, 'WC 20 562');
   yield closes.plus({ days: 3, hours: 17, minutes: 22 });
-  await receive(stage, { by: 'reclaim', deal });
+  await receive(stage, { by: 'trading', deal });
   yield closes.plus({ days: 3, hours: 19, minutes: 47 });
-  await weighIn(stage, { by: 'reclaim', deal }, { netKg: 64.3, tareKg: 18.5, resolutionG: 100, serial: 'F-11' });
+  const scale = { netKg: 31.08, tareKg: 0.38, resolutionG: 10, serial: 'No. 6', picture: 'weigh-ticket' } as const;
+  await weighIn(stage, { by: 'trading', deal }, scale);
 }
 
 /** The mass is short beyond the tolerance, and the seller accepts the claim: part of the hold goes back. */
 export async function* settledAfterClaim(stage: Stage): Story {
   const closes = stage.calendar.ago(24, '16:00');
   const bids = [
-    ['works', 360],
-    ['recovery', 520],
-    ['trading', 480],
+    ['works', 280],
+    ['recovery', 390],
+    ['trading', 350],
   ] as const;
   const deal = yield* sell(stage, { seller: 'dismantling', plan: sold.keypadPhones, closes, bids });
   yield closes.plus({ hours: 4, minutes: 9 });

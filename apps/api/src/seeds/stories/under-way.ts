@@ -9,8 +9,8 @@ import type { Stage } from '../stage.ts';
 export async function* awaitingPayment(stage: Stage): Story {
   const closes = stage.calendar.fullHour(-5);
   const bids = [
-    ['reclaim', 640],
-    ['recovery', 820],
+    ['reclaim', 520],
+    ['recovery', 620],
   ] as const;
   yield* sell(stage, { seller: 'disposal', plan: sold.branchSwitches, closes, bids });
 }
@@ -29,8 +29,8 @@ export async function* held(stage: Stage): Story {
 export async function* dispatched(stage: Stage): Story {
   const closes = stage.calendar.fullHour(-4 * 24);
   const bids = [
-    ['trading', 700],
-    ['recovery', 980],
+    ['trading', 540],
+    ['recovery', 660],
   ] as const;
   const deal = yield* sell(stage, { seller: 'disposal', plan: sold.bladeBoards, closes, bids });
   yield closes.plus({ hours: 3, minutes: 26 });
@@ -55,8 +55,8 @@ export async function* readyForCollection(stage: Stage): Story {
 export async function* received(stage: Stage): Story {
   const closes = stage.calendar.fullHour(-6 * 24);
   const bids = [
-    ['works', 180],
-    ['recovery', 260],
+    ['works', 280],
+    ['recovery', 340],
   ] as const;
   const deal = yield* sell(stage, { seller: 'dismantling', plan: sold.graphicsCards, closes, bids });
   yield closes.plus({ hours: 8, minutes: 13 });
@@ -88,9 +88,9 @@ export async function* weighedIn(stage: Stage): Story {
 export async function* inDispute(stage: Stage): Story {
   const closes = stage.calendar.fullHour(-8 * 24);
   const bids = [
-    ['reclaim', 380],
-    ['refining', 470],
-    ['recovery', 430],
+    ['reclaim', 280],
+    ['refining', 370],
+    ['recovery', 330],
   ] as const;
   const deal = yield* sell(stage, { seller: 'repairs', plan: sold.notebookBoards, closes, bids });
   yield closes.plus({ hours: 5, minutes: 42 });

@@ -49,8 +49,8 @@ export async function* offeredToUnderBidder(stage: Stage): Story {
   const missed = calendar.hoursAgo(3);
   const closes = calendar.ago(10, '14:00');
   const bids = [
-    ['recovery', 380],
-    ['trading', 420],
+    ['recovery', 270],
+    ['trading', 310],
   ] as const;
   const deal = yield* sell(stage, { seller: 'dismantling', plan: sold.consoleCrate, closes, bids });
   const debited = closes.plus({ hours: 5, minutes: 38 });
