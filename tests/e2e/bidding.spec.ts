@@ -118,50 +118,54 @@ test('the notch moves by typing, buttons and keys, and every reading of it agree
   await expect(most(page)).toHaveValue('725');
 });
 
-test('two buyers bid against each other; the close awards the lot at the second ceiling', async ({ market }) => {
-  test.setTimeout(180_000);
-  const seller = await market.member({ roles: ['seller'] });
-  const lotCode = await listLot(seller.call);
-  const first = await market.member({ roles: ['buyer'], name: 'Vennaby Bench' });
-  const second = await market.member({ roles: ['buyer'], name: 'Sallowby Bench' });
+test(
+  'two buyers bid against each other; the close awards the lot at the second ceiling',
+  { tag: '@wide' },
+  async ({ market }) => {
+    test.setTimeout(180_000);
+    const seller = await market.member({ roles: ['seller'] });
+    const lotCode = await listLot(seller.call);
+    const first = await market.member({ roles: ['buyer'], name: 'Vennaby Bench' });
+    const second = await market.member({ roles: ['buyer'], name: 'Sallowby Bench' });
 
-  await bid(first, lotCode, '600');
-  await expect(outcome(first.page)).toHaveText('Highest');
-  await expect(first.page.locator('.say')).toContainText('Your bid leads at $400.');
+    await bid(first, lotCode, '600');
+    await expect(outcome(first.page)).toHaveText('Highest');
+    await expect(first.page.locator('.say')).toContainText('Your bid leads at $400.');
 
-  await bidByKeys(second, lotCode, '550');
-  await expect(outcome(second.page)).toHaveText('Outbid');
-  await expect(second.page.locator('.say')).toContainText('the highest bid is $555');
-  await second.page.keyboard.press('Tab');
-  await second.page.keyboard.press('Enter');
-  await expect(most(second.page)).toHaveValue('560');
+    await bidByKeys(second, lotCode, '550');
+    await expect(outcome(second.page)).toHaveText('Outbid');
+    await expect(second.page.locator('.say')).toContainText('the highest bid is $555');
+    await second.page.keyboard.press('Tab');
+    await second.page.keyboard.press('Enter');
+    await expect(most(second.page)).toHaveValue('560');
 
-  await bidByKeys(second, lotCode, '900');
-  await expect(outcome(second.page)).toHaveText('Highest');
-  const mail = await mailTo(first.email, `Outbid on ${lotCode}`);
-  expect(linkOf(mail)).toMatch(new RegExp(`/lots/${lotCode}$`));
-  expect(mail.text).not.toMatch(/900|600/);
+    await bidByKeys(second, lotCode, '900');
+    await expect(outcome(second.page)).toHaveText('Highest');
+    const mail = await mailTo(first.email, `Outbid on ${lotCode}`);
+    expect(linkOf(mail)).toMatch(new RegExp(`/lots/${lotCode}$`));
+    expect(mail.text).not.toMatch(/900|600/);
 
-  await first.page.goto('/bids');
-  await expect(first.page.getByRole('heading', { name: /^Outbid 1/ })).toBeVisible();
+    await first.page.goto('/bids');
+    await expect(first.page.getByRole('heading', { name: /^Outbid 1/ })).toBeVisible();
 
-  // An own raise leaves the price where it is.
-  await bid(second, lotCode, '1,000');
-  await expect(second.page.locator('.say')).toContainText('Your bid leads at $605.');
-  const { bids, priceMinor } = await first.call<LotView>(`GET /lots/${lotCode}`);
-  expect(priceMinor).toBe(60_500);
-  expect(JSON.stringify(bids)).not.toContain('100000');
+    // An own raise leaves the price where it is.
+    await bid(second, lotCode, '1,000');
+    await expect(second.page.locator('.say')).toContainText('Your bid leads at $605.');
+    const { bids, priceMinor } = await first.call<LotView>(`GET /lots/${lotCode}`);
+    expect(priceMinor).toBe(60_500);
+    expect(JSON.stringify(bids)).not.toContain('100000');
 
-  await letLotClose(lotCode);
-  await first.page.goto(`/lots/${lotCode}`);
-  await expect(first.page.getByText(/^Closed /).first()).toBeVisible();
-  await mailTo(second.email, new RegExp(`${lotCode}.* is yours: pay`), { timeoutMs: 90_000 });
-  await mailTo(seller.email, new RegExp(`${lotCode}.* is awarded at \\$605`));
-  await second.page.goto(`/lots/${lotCode}`);
-  await expect(second.page.getByText('You have this lot at $605.')).toBeVisible();
-  await second.page.getByRole('link', { name: /^Open deal/ }).click();
-  await expect(outcome(second.page)).toHaveText(/^Pay \$6\d\d.* into the hold/);
-  await first.page.goto(`/lots/${lotCode}`);
-  await expect(first.page.getByText('It went to another buyer')).toBeVisible();
-  await expect(first.page.getByRole('link', { name: /^Open deal/ })).toHaveCount(0);
-});
+    await letLotClose(lotCode);
+    await first.page.goto(`/lots/${lotCode}`);
+    await expect(first.page.getByText(/^Closed /).first()).toBeVisible();
+    await mailTo(second.email, new RegExp(`${lotCode}.* is yours: pay`), { timeoutMs: 90_000 });
+    await mailTo(seller.email, new RegExp(`${lotCode}.* is awarded at \\$605`));
+    await second.page.goto(`/lots/${lotCode}`);
+    await expect(second.page.getByText('You have this lot at $605.')).toBeVisible();
+    await second.page.getByRole('link', { name: /^Open deal/ }).click();
+    await expect(outcome(second.page)).toHaveText(/^Pay \$6\d\d.* into the hold/);
+    await first.page.goto(`/lots/${lotCode}`);
+    await expect(first.page.getByText('It went to another buyer')).toBeVisible();
+    await expect(first.page.getByRole('link', { name: /^Open deal/ })).toHaveCount(0);
+  },
+);

@@ -13,7 +13,7 @@ const asking = '320';
 const hold = '$344.40';
 const toSeller = '$325.20';
 
-test('a lot goes from its first photo to the money on the seller’s account', async ({ market }) => {
+test('a lot goes from its first photo to the money on the seller’s account', { tag: '@wide' }, async ({ market }) => {
   test.setTimeout(240_000);
   const title = `Memory modules, 160 pieces, ${Date.now() % 100_000}`;
 
@@ -51,6 +51,24 @@ test('a lot goes from its first photo to the money on the seller’s account', a
   await test.step('statements agree on both sides and on paper', () => expectStatements(seller, buyer, dealCode));
   await test.step('the processor has sent the money on', () => expectPaidOut(seller));
   await test.step('each was told of what concerned them', () => expectMails({ seller, buyer, lotCode, dealCode }));
+});
+
+test('the same on phones, where the seller’s share waits for an account', { tag: '@phone' }, async ({ market }) => {
+  test.setTimeout(180_000);
+  const title = `Memory modules, 160 pieces, ${Date.now() % 100_000}`;
+  const seller = await market.member({ roles: ['seller'] });
+  const buyer = await market.member({ roles: ['buyer'] });
+  const lotCode = await sellAtAskingPrice(seller, { title, asking });
+  await findLot(buyer, { lotCode, title });
+  const dealCode = await takeLot(buyer, '$320');
+  await payIntoHold(buyer, hold);
+  await dispatch(seller, { dealCode, lotCode });
+  await weighIn(buyer, dealCode);
+  await accept(buyer);
+  await countersign(seller, dealCode);
+  await expect(seller.page.getByText(/^Your share waits/)).toBeVisible();
+  await seller.page.goto('/sell/payouts');
+  await expect(seller.page.getByText(`${toSeller} of settled lots waits`)).toBeVisible();
 });
 
 async function expectPlacesRemoved({ call, context }: Member, lotCode: string) {

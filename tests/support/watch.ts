@@ -2,7 +2,7 @@ import type { BrowserContext } from '@playwright/test';
 
 /**
  * What a person would only find in the browser's console: errors, pages that threw, violations of the content policy.
- * A refusal the journey provokes on purpose (400 … 422) is logged by the browser itself and doesn't count.
+ * Refusals that a journey provokes on purpose don't count.
  */
 export async function watchTroubles(context: BrowserContext, troubles: string[]): Promise<void> {
   await context.addInitScript(() => {
@@ -19,5 +19,8 @@ export async function watchTroubles(context: BrowserContext, troubles: string[])
   });
 }
 
+/** What the browser itself logs when the market refuses something, or when a test has cut the connection. */
 const isRefusal = (text: string) =>
-  /the server responded with a status of (400|401|403|404|409|413|415|422)\b/.test(text);
+  /the server responded with a status of (400|401|403|404|409|410|413|415|422)\b|net::ERR_INTERNET_DISCONNECTED/.test(
+    text,
+  );

@@ -45,7 +45,11 @@ export async function recordPapers(operator: Member, { email, name }: Member): P
   await page.goto('/desk/members');
   await page.getByRole('searchbox').fill(email);
   await page.getByRole('button', { name: 'Search' }).click();
-  await page.getByRole('row').filter({ hasText: email }).getByRole('link', { name: `Enter papers of ${name}` }).click();
+  await page
+    .getByRole('row')
+    .filter({ hasText: email })
+    .getByRole('link', { name: `Enter papers of ${name}` })
+    .click();
   await page
     .getByLabel('Papers you have seen')
     .fill('Trade register extract and waste carrier licence, both of this year');

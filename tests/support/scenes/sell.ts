@@ -11,7 +11,8 @@ export async function goOnTo(page: Page, what: string): Promise<void> {
     .click();
 }
 
-export const savedLine = (page: Page) => page.getByText(/^Saved \d\d:\d\d, here and on this device/);
+export const savedLine = (page: Page) =>
+  page.getByText(/^Saved \d\d:\d\d, here and on this device/).filter({ visible: true });
 
 export const chooseInto = (page: Page, shot: string) => page.getByLabel(`Choose photos: ${shot}`);
 
@@ -30,7 +31,10 @@ async function photograph(page: Page): Promise<void> {
     buffer,
   });
   await expectSent(page, 2);
-  await page.getByRole('textbox', { name: /^What it shows/ }).first().fill('160 modules in rows, ruler of 30 cm');
+  await page
+    .getByRole('textbox', { name: /^What it shows/ })
+    .first()
+    .fill('160 modules in rows, ruler of 30 cm');
 }
 
 /** One line of memory modules, counted and weighed. */
@@ -82,7 +86,7 @@ export async function sellAtAskingPrice({ page }: Member, { title, asking }: Off
     .first();
   await expect(view).toBeVisible();
   await page.getByLabel('Title').focus();
-  await expect(savedLine(page).first()).toBeVisible();
+  await expect(savedLine(page)).toBeVisible();
   await page.reload();
   await expect(page.getByLabel('Title')).toHaveValue(title);
   await expect(page.getByRole('heading', { level: 2 }).first()).toBeVisible();

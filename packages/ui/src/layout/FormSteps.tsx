@@ -53,6 +53,7 @@ export function FormSteps({ title, steps, link, saved }: FormStepsProps) {
         </summary>
         {list}
       </details>
+      {saved && <p className="steps-saved tiny mute">{saved}</p>}
     </nav>
   );
 }
