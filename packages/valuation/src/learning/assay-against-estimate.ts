@@ -44,7 +44,7 @@ export function assayAgainstEstimate(
 
 /**
  * How a result agrees with a reference: zeta = difference / √(sd² + referenceSd²); E_n the same with expanded uncertainties,
- * twice the sd. Both 0 when nothing is uncertain and nothing differs.
+ * twice the sd. Both 0 when nothing differs, infinite when something does though nothing is uncertain.
  * Source: ISO 13528:2022, 9.6 and 9.7 (from memory).
  */
 export function scores(of: { value: number; sd: number; reference: number; referenceSd: number }): {

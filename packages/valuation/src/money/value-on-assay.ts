@@ -109,24 +109,21 @@ function shareOf(shareBp: number): number {
   return shareBp / wholeBp;
 }
 
-function purchaseIn({ whole, treatment }: PerDraw, i: number, share: number): number {
-  return purchaseMinor(share, whole[i] as number, treatment[i] as number);
-}
-
-function meanPurchase(perDraw: PerDraw, share: number): number {
+function meanPurchase({ whole, treatment }: PerDraw, share: number): number {
   let sum = 0;
-  for (let i = 0; i < perDraw.net.length; i += 1) sum += purchaseIn(perDraw, i, share);
-  return sum / perDraw.net.length;
+  for (let i = 0; i < whole.length; i += 1) sum += purchaseMinor(share, whole[i] as number, treatment[i] as number);
+  return sum / whole.length;
 }
 
-function profits(perDraw: PerDraw, share: number, fee: number): Float64Array {
-  return perDraw.net.map((net, i) => net - purchaseIn(perDraw, i, share) * fee);
+function profits({ net, whole, treatment }: PerDraw, share: number, fee: number): Float64Array {
+  return net.map((each, i) => each - purchaseMinor(share, whole[i] as number, treatment[i] as number) * fee);
 }
 
-function countKept(perDraw: PerDraw, share: number, fee: number): number {
+function countKept({ net, whole, treatment }: PerDraw, share: number, fee: number): number {
   let kept = 0;
-  for (let i = 0; i < perDraw.net.length; i += 1) {
-    if ((perDraw.net[i] as number) >= purchaseIn(perDraw, i, share) * fee) kept += 1;
+  for (let i = 0; i < net.length; i += 1) {
+    const purchase = purchaseMinor(share, whole[i] as number, treatment[i] as number);
+    if ((net[i] as number) >= purchase * fee) kept += 1;
   }
   return kept;
 }
@@ -137,7 +134,8 @@ function highestSafeShare(perDraw: PerDraw, netMean: number, terms: BuyerTerms):
   const wanted = terms.wantedChance * perDraw.net.length;
   const keeps = (shareBp: number) => {
     const share = shareBp / wholeBp;
-    return countKept(perDraw, share, fee) >= wanted && netMean >= meanPurchase(perDraw, share) * (fee + terms.margin);
+    // The margin first: it is the cheaper of the two to look at.
+    return netMean >= meanPurchase(perDraw, share) * (fee + terms.margin) && countKept(perDraw, share, fee) >= wanted;
   };
   if (!keeps(0)) return null;
   let [safe, unsafe] = [0, wholeBp + 1];
