@@ -7,7 +7,8 @@ import { runScript } from './lib/main.mjs';
 import { assertNodeVersion, ensurePackages } from './lib/packages.mjs';
 import { localDir } from './lib/root.mjs';
 
-const usage = `The quick gate: types, lint, import rules, format and the unit tests. Needs no database and no browser.
+const usage = `The quick gate: types, lint, import rules, format and the unit tests. Needs no database; one
+check compares the valuation in Node and in Chromium, which is installed when missing.
 
 usage: npm run check`;
 

@@ -33,6 +33,7 @@ export * from './money/mass-short-adjustment.ts';
 export { compareAssays, splittingLimitShare, type AssayComparison } from './settlement/compare-assays.ts';
 export * from './settlement/resolve-by-umpire.ts';
 export * from './settlement/settle-on-assay.ts';
+export * from './settlement/hold-on-assay.ts';
 export * from './settlement/divide-hold.ts';
 export * from './settlement/claim-value.ts';
 export { type Written } from './settlement/decimal-argument.ts';

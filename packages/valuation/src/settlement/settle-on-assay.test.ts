@@ -3,7 +3,8 @@ import { expect, test } from 'vitest';
 import { fromGrams, massUnits, toGrams } from '../units/mass.ts';
 import { compareAssays } from './compare-assays.ts';
 import { divideHold } from './divide-hold.ts';
-import { settleOnAssay, type AssaySettlement } from './settle-on-assay.ts';
+import { holdOnAssay } from './hold-on-assay.ts';
+import { settleFineGold, settleOnAssay, type AssaySettlement } from './settle-on-assay.ts';
 
 const example: AssaySettlement = {
   netMassG: 12_400,
@@ -65,6 +66,19 @@ test('the value is the same whichever unit the mass was entered in', () => {
       expect(settleOnAssay({ ...example, netMassG: entered })).toEqual(settleOnAssay({ ...example, netMassG }));
     }),
   );
+});
+
+test('gold from an estimate is valued by the same steps', () => {
+  const { steps, valueMinor } = settleFineGold({ ...example, fineG: '7.5888' });
+  expect(valueMinor).toBe(75_549);
+  expect(steps.slice(1)).toEqual(settleOnAssay(example).steps.slice(2));
+  expect(() => settleFineGold({ ...example, fineG: -1 })).toThrow('fineG');
+});
+
+test('the hold of a bid is what the buyer would owe at the frozen p75', () => {
+  const fees = { buyerFeeShare: 0.02, buyerTaxShare: 0.1 };
+  const hold = holdOnAssay({ ...example, fineG: 7.5888, freightMinor: 2500, ...fees });
+  expect(hold).toEqual({ valueMinor: 75_549, freightMinor: 2500, feeMinor: 1511, taxMinor: 151, totalMinor: 79_711 });
 });
 
 test('digits from a database and numbers give the same', () => {

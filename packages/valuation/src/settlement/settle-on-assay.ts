@@ -2,12 +2,8 @@ import { Decimal } from 'decimal.js';
 import { wholeBp } from '../money/assay-sale.ts';
 import { toDecimal, type Written } from './decimal-argument.ts';
 
-/** What was found, bid and agreed; figures as written down. Money in minor units, not necessarily whole. */
-export interface AssaySettlement {
-  /** Dry net mass as weighed in, grams. */
-  netMassG: Written;
-  /** The assay that stands, g/t. */
-  gradeGPerT: Written;
+/** What was bid and agreed, beside the gold; figures as written down. Money in minor units, not necessarily whole. */
+export interface AssayTerms {
   /** Payable share, hundredths of a point, 0 … 10 000. */
   shareBp: number;
   minimumDeductionG: Written;
@@ -16,6 +12,20 @@ export interface AssaySettlement {
   treatmentPerKgMinor: Written;
   /** Per payable gram. */
   refiningPerGMinor: Written;
+}
+
+export interface AssaySettlement extends AssayTerms {
+  /** Dry net mass as weighed in, grams. */
+  netMassG: Written;
+  /** The assay that stands, g/t. */
+  gradeGPerT: Written;
+}
+
+/** For a value without an assay: the hold at the frozen p75, or a deal in which no assay came in. */
+export interface FineGoldSettlement extends AssayTerms {
+  netMassG: Written;
+  /** Fine gold, grams, from the frozen estimate. */
+  fineG: Written;
 }
 
 export type SettlementStepKey =
@@ -54,30 +64,34 @@ const Exact = Decimal.clone({ precision: 60 });
  * @throws {RangeError} naming the figure that is out of its range
  */
 export function settleOnAssay(given: AssaySettlement): SettledValue {
-  const read = (name: Exclude<keyof AssaySettlement, 'shareBp'>, most?: number) =>
-    new Exact(toDecimal(name, given[name], 0, most));
-  const massG = read('netMassG');
-  const gradeGPerT = read('gradeGPerT', 1e6);
-  const deductionG = read('minimumDeductionG');
-  const price = read('pricePerGMinor');
-  const shareBp = new Exact(toDecimal('shareBp', given.shareBp, 0, wholeBp));
+  const massG = new Exact(toDecimal('netMassG', given.netMassG, 0));
+  const gradeGPerT = new Exact(toDecimal('gradeGPerT', given.gradeGPerT, 0, 1e6));
+  const { valueMinor, steps } = valueOf(massG, massG.times(gradeGPerT).div(1e6), given);
+  return { valueMinor, steps: [step('netMass', 'g', massG), step('grade', 'g/t', gradeGPerT), ...steps] };
+}
 
-  const fineG = massG.times(gradeGPerT).div(1e6);
+/**
+ * The same where the fine gold is taken from an estimate and not from an assay.
+ * @throws {RangeError} naming the figure that is out of its range
+ */
+export function settleFineGold(given: FineGoldSettlement): SettledValue {
+  const massG = new Exact(toDecimal('netMassG', given.netMassG, 0));
+  const { valueMinor, steps } = valueOf(massG, new Exact(toDecimal('fineG', given.fineG, 0)), given);
+  return { valueMinor, steps: [step('netMass', 'g', massG), ...steps] };
+}
+
+function valueOf(massG: Decimal, fineG: Decimal, terms: AssayTerms): SettledValue {
+  const read = (name: Exclude<keyof AssayTerms, 'shareBp'>) => new Exact(toDecimal(name, terms[name], 0));
+  const shareBp = new Exact(toDecimal('shareBp', terms.shareBp, 0, wholeBp));
+  const [deductionG, price] = [read('minimumDeductionG'), read('pricePerGMinor')];
   const payableG = Exact.max(0, fineG.minus(deductionG)).times(shareBp).div(wholeBp);
   const gross = payableG.times(price);
   const treatment = massG.div(1000).times(read('treatmentPerKgMinor'));
   const refining = payableG.times(read('refiningPerGMinor'));
   const value = Exact.max(0, gross.minus(treatment).minus(refining));
-  const step = (key: SettlementStepKey, unit: SettlementStep['unit'], amount: Decimal): SettlementStep => ({
-    key,
-    value: amount.toFixed(),
-    unit,
-  });
   return {
     valueMinor: value.toDecimalPlaces(0, Decimal.ROUND_HALF_EVEN).toNumber(),
     steps: [
-      step('netMass', 'g', massG),
-      step('grade', 'g/t', gradeGPerT),
       step('fine', 'g', fineG),
       step('deduction', 'g', deductionG),
       step('share', 'bp', shareBp),
@@ -90,3 +104,9 @@ export function settleOnAssay(given: AssaySettlement): SettledValue {
     ],
   };
 }
+
+const step = (key: SettlementStepKey, unit: SettlementStep['unit'], amount: Decimal): SettlementStep => ({
+  key,
+  value: amount.toFixed(),
+  unit,
+});
