@@ -32,7 +32,7 @@ export function MoneyAxis({ axisMaxG, width, isWide, money, bid, flag }: MoneySc
   const clear = FLAG_CLEARANCE[isWide ? 'wide' : 'phone'];
   const ticks = moneyTicks(axisMaxG, money, isWide ? Math.round(width / MONEY_LABEL_PX) : 4).filter(({ goldG }) => {
     const x = share(goldG) * width;
-    const isByFlag = flagShare !== null && Math.abs(x - flagShare * width) < clear;
+    const isByFlag = flagShare !== null && Math.abs(x - flagMiddle(flagShare, width)) < clear;
     return !isByFlag && x > NAME_CLEARANCE[isWide ? 'wide' : 'phone'] && x < width - 30;
   });
   const hidesName = flagShare !== null && flagShare * width < NAME_CLEARANCE.wide + 70;
@@ -55,14 +55,30 @@ export function MoneyAxis({ axisMaxG, width, isWide, money, bid, flag }: MoneySc
   );
 }
 
+/** Half the width of the bid's flag, px. Nearer to an end than this and a little more, it stands to one side of its notch. */
+const FLAG_HALF_PX = 45;
+const FLAG_ROOM_PX = 70;
+
 function flagClass(share: number, width: number): string {
-  if (share * width < 70) return 'flag at-start';
-  return share * width > width - 70 ? 'flag at-end' : 'flag';
+  if (share * width < FLAG_ROOM_PX) return 'flag at-start';
+  return share * width > width - FLAG_ROOM_PX ? 'flag at-end' : 'flag';
 }
+
+/** Where the middle of the flag's words comes to stand, px. */
+function flagMiddle(share: number, width: number): number {
+  const notch = share * width;
+  if (notch < FLAG_ROOM_PX) return notch + FLAG_HALF_PX;
+  return notch > width - FLAG_ROOM_PX ? notch - FLAG_HALF_PX : notch;
+}
+
+/** Ticks farther out than this share of the axis would meet its end, which is always named. */
+const LAST_TICK = { wide: 0.94, phone: 0.86 };
 
 /** The stone's lower edge: grams of gold. */
 export function GoldAxis({ axisMaxG, isWide }: Omit<ScaleProps, 'width'>) {
-  const ticks = goldTicks(axisMaxG, isWide ? 12 : 4).filter((goldG) => goldG <= axisMaxG * 0.94);
+  const ticks = goldTicks(axisMaxG, isWide ? 12 : 4).filter(
+    (goldG) => goldG <= axisMaxG * LAST_TICK[isWide ? 'wide' : 'phone'],
+  );
   return (
     <div className="scale" aria-hidden="true">
       {ticks.map((goldG) => (
