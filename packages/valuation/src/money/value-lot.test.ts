@@ -75,7 +75,10 @@ describe('the highest safe bid', () => {
         (wantedChance, margin) => {
           const valued = value({ wantedChance, margin });
           const safe = valued.highestSafeBidMinor;
-          if (safe === null) return expect(valued.chanceOfProfit(0)).toBeLessThan(wantedChance);
+          if (safe === null) {
+            expect(valued.chanceOfProfit(0)).toBeLessThan(wantedChance);
+            return;
+          }
           const keeps = (amount: number) =>
             valued.chanceOfProfit(amount) >= wantedChance &&
             valued.expectedProfitMinor(amount) >= margin * amount - 1e-6;
