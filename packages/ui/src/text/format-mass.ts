@@ -4,12 +4,11 @@ import { formatNumber, formatSignificant } from './format-number.ts';
 /** Grams in one troy ounce, exact by definition. */
 export const GRAMS_PER_OZT = 31.1034768;
 
-/** A mass that came off a scale, in the unit one would weigh it in: g below 1 kg, kg up to 10 t, else t. */
+/** A mass that came off a scale, in the unit one would weigh it in: g below 1 kg, kg to the gram up to 10 t, else t. */
 export function formatMassG(massG: number): string {
   const size = Math.abs(massG);
   if (size < 1000) return `${formatNumber(massG, { maximumFractionDigits: size < 10 ? 2 : 1 })}${NBSP}g`;
-  if (size < 10_000_000)
-    return `${formatNumber(massG / 1000, { maximumFractionDigits: size < 100_000 ? 2 : 1 })}${NBSP}kg`;
+  if (size < 10_000_000) return `${formatNumber(massG / 1000, { maximumFractionDigits: 3 })}${NBSP}kg`;
   return `${formatNumber(massG / 1_000_000, { maximumFractionDigits: 2 })}${NBSP}t`;
 }
 

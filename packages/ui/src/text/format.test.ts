@@ -38,6 +38,8 @@ describe('mass', () => {
   it('chooses the unit by size', () => {
     expect(formatMassG(206.25)).toBe('206.3\u00a0g');
     expect(formatMassG(86_400)).toBe('86.4\u00a0kg');
+    expect(formatMassG(1598)).toBe('1.598\u00a0kg');
+    expect(formatMassG(310_250)).toBe('310.25\u00a0kg');
     expect(formatMassG(412_000)).toBe('412\u00a0kg');
     expect(formatMassG(12_500_000)).toBe('12.5\u00a0t');
   });

@@ -15,7 +15,9 @@ export function EstimateParts({ lot }: { lot: Estimated }) {
           <thead>
             <tr>
               <th scope="col">Line</th>
-              <th scope="col">Pieces</th>
+              <th scope="col" className="r">
+                Pieces
+              </th>
               <th scope="col" className="r">
                 Mass, kg
               </th>
@@ -43,7 +45,7 @@ export function EstimateParts({ lot }: { lot: Estimated }) {
 }
 
 const kilograms = (massG: number): string =>
-  formatNumber(massG / 1000, { minimumFractionDigits: 1, maximumFractionDigits: massG < 10_000 ? 2 : 1 });
+  formatNumber(massG / 1000, { minimumFractionDigits: 1, maximumFractionDigits: 3 });
 const gradeOf = (goldG: number, massG: number): string =>
   massG > 0 ? formatSignificant((goldG / massG) * 1e6, 2) : '–';
 
@@ -56,7 +58,7 @@ function LineRow({ line, number, estimate }: { line: PublicLine; number: number;
         {number}. {line.label || line.className}
         <span className="line-evidence">{evidenceWords(line).join('. ')}</span>
       </th>
-      <td>{line.pieces === null ? '–' : formatNumber(line.pieces)}</td>
+      <td className="r">{line.pieces === null ? '–' : formatNumber(line.pieces)}</td>
       <td className="r">{kilograms(own.massG)}</td>
       <td className="r">{gradeOf(own.goldG.mean, own.massG)}</td>
       <td className="r">{formatSignificant(own.goldG.mean, 2)}</td>
@@ -72,7 +74,7 @@ function TotalRow({ lot: { estimate, pieces } }: { lot: Estimated }) {
     <tfoot>
       <tr>
         <th scope="row">Lot</th>
-        <td>{pieces === null ? '' : formatNumber(pieces)}</td>
+        <td className="r">{pieces === null ? '' : formatNumber(pieces)}</td>
         <td className="r">{kilograms(estimate.massG)}</td>
         <td className="r">{gradeOf(estimate.goldG.mean, estimate.massG)}</td>
         <td className="r">{formatSignificant(estimate.goldG.mean, 2)}</td>
