@@ -10,7 +10,17 @@ import {
   useWords,
 } from '@lydite/client';
 import type { LotView } from '@lydite/contracts';
-import { ChainRail, ChainSteps, formatMassG, formatNumber, formatShare, Page, PageHead, Streak } from '@lydite/ui';
+import {
+  ChainRail,
+  ChainSteps,
+  countryName,
+  formatMassG,
+  formatNumber,
+  formatShare,
+  Page,
+  PageHead,
+  Streak,
+} from '@lydite/ui';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { useEffect, useRef } from 'react';
 import { useParams } from 'react-router-dom';
@@ -78,7 +88,9 @@ function LotHead({ lot }: { lot: LotView }) {
     deliveredLots === 0
       ? 'The seller’s first lot here'
       : `Seller has delivered ${formatNumber(deliveredLots)} ${deliveredLots === 1 ? 'lot' : 'lots'}${
-          medianMassDifference === null ? '' : `, half within ${formatShare(medianMassDifference)} of the stated mass`
+          medianMassDifference === null
+            ? ''
+            : `, ${deliveredLots === 1 ? '' : 'half '}within ${formatShare(medianMassDifference)} of the stated mass`
         }`;
   const facts = [
     <>
@@ -89,7 +101,7 @@ function LotHead({ lot }: { lot: LotView }) {
         <b>{formatNumber(lot.pieces)}</b> pieces
       </>
     ),
-    `${lot.place}, ${lot.country}`,
+    [lot.place, countryName(lot.country)].filter(Boolean).join(', '),
     record,
   ].filter(Boolean);
   const isOver = useIsOver(lot);

@@ -133,7 +133,7 @@ function Bench({ own, lot }: { own: MyLotView; lot: LotView }) {
       </Reading>
       {reserveReached !== null && (
         <Reading name="Your lowest price" value={money(own.draft.sale.reserveMinor ?? 0)}>
-          {reserveReached ? 'It is reached' : 'It is not reached yet'}
+          {reserveWords(reserveReached, own.state === 'open')}
         </Reading>
       )}
       {priceMinor !== null && (
@@ -141,12 +141,17 @@ function Bench({ own, lot }: { own: MyLotView; lot: LotView }) {
           name="In hand at that price"
           value={money(inHandMinor(priceMinor, { sellerFeeBp, freightMinor: lot.delivery.freightMinor }))}
         >
-          With freight, after the market’s fee
+          {lot.delivery.freightMinor > 0 ? 'With freight, after the market’s fee' : 'After the market’s fee'}
         </Reading>
       )}
       <Actions own={own} />
     </div>
   );
+}
+
+function reserveWords(isReached: boolean, isOpen: boolean): string {
+  if (isReached) return isOpen ? 'It is reached' : 'It was reached';
+  return isOpen ? 'It is not reached yet' : 'It was not reached';
 }
 
 function Actions({ own }: { own: MyLotView }) {

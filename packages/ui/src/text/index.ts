@@ -1,4 +1,5 @@
 export { EN_DASH, MINUS, NBSP } from './characters.ts';
+export { countryName } from './country-name.ts';
 export { currencySign, formatAbout, formatMoney } from './format-money.ts';
 export {
   formatBreakEvenG,

@@ -1,7 +1,6 @@
 import type { LotDraft } from '@lydite/contracts';
-import type { Fact } from '@lydite/ui';
+import { countryName, type Fact } from '@lydite/ui';
 import { counted } from '../../lib/counted.ts';
-import { countryName } from '../../lib/countries.ts';
 
 const open = 'Not said yet';
 
@@ -28,7 +27,7 @@ export function listingFacts(
       value:
         delivery.way === 'seller-sends'
           ? `You send it; freight ${delivery.freightMinor === null ? 'not said yet' : money(delivery.freightMinor)}`
-          : `Collection${delivery.hours ? `, ${delivery.hours}` : ''}`,
+          : `Collection${delivery.hours ? `: ${delivery.hours}` : ''}`,
     },
     { name: 'Place', value: [delivery.place, countryName(declarations.country)].filter(Boolean).join(', ') || open },
   ];
