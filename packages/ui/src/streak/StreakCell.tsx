@@ -65,8 +65,8 @@ export function StreakAxisHead({
         {marks.map(({ name, gradeGPerT }) => (
           <i key={name} style={left(gradeShare(gradeGPerT))} />
         ))}
-        {gradeTicks().map(({ gradeGPerT, share }) => (
-          <span key={gradeGPerT} className="tick" style={left(share)}>
+        {gradeTicks().map(({ gradeGPerT, share, isSparse }) => (
+          <span key={gradeGPerT} className={isSparse ? 'tick' : 'tick tick-dense'} style={left(share)}>
             {formatNumber(gradeGPerT)}
           </span>
         ))}

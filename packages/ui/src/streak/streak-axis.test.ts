@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { bidAt, goldAt, goldTicks, gradeShare, moneyTicks, streakAxisMaxG } from './streak-axis.ts';
+import { bidAt, goldAt, goldTicks, gradeShare, gradeTicks, moneyTicks, streakAxisMaxG } from './streak-axis.ts';
 import { lognormalEstimate } from './streak-fixtures.ts';
 
 const money = { currency: 'USD', atZeroMinor: -36_300, perGMinor: 12_369 };
@@ -39,6 +39,13 @@ describe('the money axis', () => {
 });
 
 describe('the list’s axis', () => {
+  it('leaves room between the figures of a phone’s stone', () => {
+    const phonePx = 390;
+    const figurePx = 50;
+    const sparse = gradeTicks().filter(({ isSparse }) => isSparse);
+    for (const [i, { share }] of sparse.slice(1).entries())
+      expect((share - (sparse[i]?.share ?? 0)) * phonePx).toBeGreaterThan(figurePx);
+  });
   it('keeps what lies outside at its ends', () => {
     expect(gradeShare(10)).toBe(0);
     expect(gradeShare(1)).toBe(0);

@@ -8,6 +8,8 @@ export const GRADE_AXIS: readonly [number, number] = [10, 20_000];
 /** Wanted number of ticks on the wide stone. */
 const TICKS = 12;
 const GRADE_TICKS = [20, 50, 100, 200, 500, 1000, 2000, 5000, 10_000];
+/** Those that keep their figure on a narrow stone, where all would run into one another. */
+const SPARSE_TICKS = new Set([20, 100, 500, 2000, 10_000]);
 
 export interface StreakAxis {
   /** Position in px of an amount of gold in grams. */
@@ -56,8 +58,12 @@ export function gradeAxis(geometry: StreakGeometry, massG: number): StreakAxis {
 }
 
 /** Ticks of the list's axis as shares of its width, for the head of the column. */
-export function gradeTicks(): { gradeGPerT: number; share: number }[] {
-  return GRADE_TICKS.map((gradeGPerT) => ({ gradeGPerT, share: gradeShare(gradeGPerT) }));
+export function gradeTicks(): { gradeGPerT: number; share: number; isSparse: boolean }[] {
+  return GRADE_TICKS.map((gradeGPerT) => ({
+    gradeGPerT,
+    share: gradeShare(gradeGPerT),
+    isSparse: SPARSE_TICKS.has(gradeGPerT),
+  }));
 }
 
 /** Where a grade stands on the list's axis, 0 … 1. */
