@@ -6,7 +6,8 @@ import { useTitle } from './use-title.ts';
 /** What a page shows that could not be shown. */
 export function ErrorPage() {
   const error = useRouteError();
-  if (isApiError(error) && error.status === 404) return <NotFoundPage />;
+  // A page sends nothing but its address to be shown: what the market cannot read there leads nowhere either.
+  if (isApiError(error) && (error.status === 404 || error.code === 'request.invalid')) return <NotFoundPage />;
   if (isRouteErrorResponse(error) && error.status === 404) return <NotFoundPage />;
   return <FailedPage error={error} />;
 }
