@@ -7,11 +7,12 @@ mountApp({
   roleWord: 'Desk',
   basename: '/desk',
   nav: [
-    { to: '/', label: 'Deals', end: true },
-    { to: '/lots', label: 'Lots' },
-    { to: '/members', label: 'Members' },
-    { to: '/effects', label: 'Outbox and jobs' },
-    { to: '/ledger', label: 'Ledger check' },
+    { to: '/', label: 'Deals', end: true, role: 'operator' },
+    { to: '/', label: 'Requests', end: true, role: 'assayer' },
+    { to: '/lots', label: 'Lots', role: 'operator' },
+    { to: '/members', label: 'Members', role: 'operator' },
+    { to: '/effects', label: 'Outbox and jobs', role: 'operator' },
+    { to: '/ledger', label: 'Ledger check', role: 'operator' },
   ],
   routes,
 });

@@ -3,7 +3,7 @@ import { usePrefetchQuery, useQuery } from '@tanstack/react-query';
 import { Suspense, useEffect, useRef, useState } from 'react';
 import { Link, NavLink, Outlet, ScrollRestoration, useLocation } from 'react-router-dom';
 import { marketQuery } from '../market/market.queries.ts';
-import { sessionQuery } from '../session/session.queries.ts';
+import { hasRole, sessionQuery } from '../session/session.queries.ts';
 import { onAnnouncement } from './announce.ts';
 import { clientsOf, type ClientApp } from './client-app.ts';
 import { MemberMenu } from './MemberMenu.tsx';
@@ -29,9 +29,9 @@ export function Shell({ app, roleWord, nav }: Pick<ClientApp, 'app' | 'roleWord'
         nav={
           signedIn || app === 'buyer'
             ? nav
-                .filter(({ to }) => member !== null || to === '/')
+                .filter(({ to, role }) => (member ? !role || hasRole(member, role) : to === '/'))
                 .map(({ to, label, end }) => (
-                  <NavLink key={to} to={to} end={end ?? false}>
+                  <NavLink key={label} to={to} end={end ?? false}>
                     {label}
                   </NavLink>
                 ))

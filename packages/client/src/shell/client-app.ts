@@ -8,7 +8,8 @@ export interface ClientApp {
   roleWord: string;
   /** Where the client lives below the one origin: `/`, `/sell` or `/desk`. */
   basename: string;
-  nav: readonly { to: string; label: string; end?: boolean }[];
+  /** The sections; one with a role is for members who have it alone. */
+  nav: readonly { to: string; label: string; end?: boolean; role?: Role }[];
   routes: RouteObject[];
 }
 
