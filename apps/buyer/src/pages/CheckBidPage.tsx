@@ -1,4 +1,4 @@
-import { catalogueQuery, isApiError, useWords } from '@lydite/client';
+import { catalogueQuery, isApiError, useTitle, useWords } from '@lydite/client';
 import type { LotView } from '@lydite/contracts';
 import { buttonClass, FactList, Notice, Page } from '@lydite/ui';
 import { useSuspenseQuery } from '@tanstack/react-query';
@@ -17,6 +17,8 @@ import { mostParam, readMost } from '../lib/most-param.ts';
 import { ReadingWords } from '../lib/worth/ReadingWords.tsx';
 import { useLotWorth } from '../lib/worth/use-lot-worth.ts';
 
+const title = 'Check this bid';
+
 /** A bid on a page of its own: what it may cost and when it binds, before it does. */
 export function Component() {
   const { lotCode = '' } = useParams();
@@ -31,7 +33,7 @@ export function Component() {
     );
   return (
     <Page shape="narrow">
-      <h1>Check this bid</h1>
+      <h1>{title}</h1>
       <LotLine lot={lot} />
       <BidCheck lot={lot} amountMinor={readMost(search)} place={place} />
     </Page>
@@ -69,7 +71,7 @@ function BidCheck({ lot, amountMinor, place }: BidCheckProps) {
     <>
       <BidFacts lot={lot} amountMinor={amountMinor} />
       <BindingForm
-        title="Check this bid"
+        title={title}
         button="Make it binding"
         isSending={place.isPending}
         refusal={place.error && <BidRefusal error={place.error} lotCode={lot.code} />}
@@ -127,6 +129,7 @@ function BidFacts({ lot, amountMinor }: { lot: LotView; amountMinor: number }) {
 }
 
 function NoBid({ problem, back, way }: { problem: string; back: string; way: string }) {
+  useTitle(title);
   return (
     <div className="mt-6">
       <Notice tone="warn">{problem}</Notice>

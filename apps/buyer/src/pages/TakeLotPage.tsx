@@ -1,4 +1,4 @@
-import { catalogueQuery, isApiError, useWords } from '@lydite/client';
+import { catalogueQuery, isApiError, useTitle, useWords } from '@lydite/client';
 import type { LotView } from '@lydite/contracts';
 import { buttonClass, FactList, Notice, Page } from '@lydite/ui';
 import { useSuspenseQuery } from '@tanstack/react-query';
@@ -34,6 +34,8 @@ function TakeCheck({ lot }: { lot: LotView }) {
   const attempt = useAttempt();
   const take = useTakeLot(lot.code);
   const { priceMinor } = lot;
+  const dealCode = lot.you?.dealCode;
+  useTitle(title);
   const isOpen = lot.state === 'open' && lot.form === 'asking-price' && priceMinor !== null;
   const back = (
     <Link className={buttonClass('quiet')} to={`/lots/${lot.code}`}>
@@ -43,8 +45,17 @@ function TakeCheck({ lot }: { lot: LotView }) {
   if (!isOpen && !take.isPending && !take.data)
     return (
       <div className="mt-6">
-        <Notice tone="warn">{take.error?.message ?? 'This lot can’t be taken at a price now.'}</Notice>
-        <p className="actions">{back}</p>
+        <Notice tone="warn">
+          {take.error?.message ?? (dealCode ? 'You have this lot already.' : 'This lot can’t be taken at a price now.')}
+        </Notice>
+        <p className="actions">
+          {dealCode && (
+            <Link className={buttonClass('primary')} to={`/deals/${dealCode}`}>
+              Open deal {dealCode}
+            </Link>
+          )}
+          {back}
+        </p>
       </div>
     );
   const send = () =>
