@@ -51,7 +51,7 @@ export function DealCase({ deal }: { deal: DeskDeal }) {
               {moment(event.at)}
             </time>
             <span>
-              <b>{event.title}</b>, {event.by}
+              <b>{event.title}</b> <span className="mute">· {event.by}</span>
             </span>
           </li>
         ))}

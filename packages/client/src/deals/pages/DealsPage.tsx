@@ -93,5 +93,5 @@ function outcome(
   if (side === 'seller' && sellerGetsMinor !== null)
     return `${money(sellerGetsMinor)} to you${payoutState ? `, ${payoutWords[payoutState] ?? payoutState}` : ''}`;
   if (side === 'buyer' && refundMinor) return `${money(refundMinor)} back`;
-  return state === 'cancelled' || side === 'seller' ? 'price' : `price; ${money(holdMinor)} with fees`;
+  return state === 'cancelled' || side === 'seller' ? 'price' : `price; ${money(holdMinor)} into hold`;
 }

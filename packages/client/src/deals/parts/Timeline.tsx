@@ -15,7 +15,7 @@ export function Timeline({ events }: { events: DealView['events'] }) {
               {moment(event.at)}
             </time>
             <div className="small">
-              <b>{event.title}</b>, {event.by}
+              <b>{event.title}</b> <span className="mute">· {event.by}</span>
               {event.detail && <p className="mute">{event.detail}</p>}
             </div>
           </li>
