@@ -1,15 +1,27 @@
-import { LOCALE } from '@lydite/ui';
+import { useMarket, useNow } from '@lydite/client';
+import { formatDateTime } from '@lydite/ui';
 import { useDraft } from '../draft-context.tsx';
 import type { DraftSnapshot } from '../draft-keeper.ts';
 
-const clock = new Intl.DateTimeFormat(LOCALE, { hour: '2-digit', minute: '2-digit', hourCycle: 'h23' });
+/** When the draft was saved, in the market's time like every other: the time alone on the same day, else with its date. */
+export function savedAtWords(iso: string, now: Date, zone: string): string {
+  const day = (moment: string) => formatDateTime(moment, zone, { time: false });
+  const [date, time] = formatDateTime(iso, zone, { weekday: false }).split(', ');
+  return day(iso) === day(now.toISOString()) ? (time ?? '') : `${date}, ${time}`;
+}
 
-/** Where the draft is safe, and since when: "Saved 14:22, here and on this device." */
-export function savedWords({ state, lot, isKeptHere }: Pick<DraftSnapshot, 'state' | 'lot' | 'isKeptHere'>): string {
+function useSavedAt(): string {
+  const { lot } = useDraft();
+  const { zone } = useMarket();
+  return savedAtWords(lot.savedAt, useNow(), zone);
+}
+
+/** Where the draft is safe, and since when: "Saved 14:22 CET, here and on this device." */
+function savedWords({ state, isKeptHere }: Pick<DraftSnapshot, 'state' | 'isKeptHere'>, savedAt: string): string {
   const here = isKeptHere ? 'Kept on this device' : 'Not kept yet';
   switch (state) {
     case 'saved':
-      return `Saved ${clock.format(new Date(lot.savedAt))}${isKeptHere ? ', here and on this device' : ''}. You can close the page and go on from your phone.`;
+      return `Saved ${savedAt}${isKeptHere ? ', here and on this device' : ''}. You can close the page and go on from your phone.`;
     case 'changed':
       return `${here}, saved in a moment.`;
     case 'saving':
@@ -32,10 +44,11 @@ const shortWords: Partial<Record<DraftSnapshot['state'], string>> = {
 
 /** The same in a word or two, for narrow screens. */
 export function SavedNote() {
-  const { state, lot } = useDraft();
-  return state === 'saved' ? `Saved ${clock.format(new Date(lot.savedAt))}` : (shortWords[state] ?? 'Not saved yet');
+  const { state } = useDraft();
+  const savedAt = useSavedAt();
+  return state === 'saved' ? `Saved ${savedAt}` : (shortWords[state] ?? 'Not saved yet');
 }
 
 export function SavedLine() {
-  return savedWords(useDraft());
+  return savedWords(useDraft(), useSavedAt());
 }
