@@ -1,4 +1,5 @@
 import { Refusal, useTitle } from '@lydite/client';
+import type { MyLotView } from '@lydite/contracts';
 import { Button, buttonClass, Page } from '@lydite/ui';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { Link, useNavigate, useParams } from 'react-router-dom';
@@ -23,7 +24,7 @@ export function Component() {
         <li>The moment somebody bids, a lot can be withdrawn only by the desk.</li>
       </ul>
       <div className="mt-6">
-        <Refusal>{isPossible ? withdraw.error?.message : 'Somebody has bid meanwhile, or it has closed.'}</Refusal>
+        <Refusal>{isPossible ? withdraw.error?.message : reasonAgainst(lot)}</Refusal>
       </div>
       <div className="actions">
         <Button
@@ -42,4 +43,11 @@ export function Component() {
       </div>
     </Page>
   );
+}
+
+function reasonAgainst({ state, bidders }: MyLotView): string {
+  if (state !== 'open') return 'It is not on the market any more.';
+  return bidders === 1
+    ? 'It has a bid: only the desk can withdraw it now.'
+    : 'It has bids: only the desk can withdraw it now.';
 }

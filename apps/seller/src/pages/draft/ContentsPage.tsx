@@ -42,7 +42,7 @@ export function Component() {
         <TextField
           label="Title"
           id="title"
-          hint="What buyers read first: what it is, and how much."
+          hint="What buyers read first: what it is, and how much; at most 90 characters."
           value={draft.title}
           onChange={(event) => edit((current) => ({ ...current, title: event.target.value.slice(0, 90) }))}
         />

@@ -27,7 +27,7 @@ export function LeftTable({ rows, currency, sellerFeeShare, usualMinor }: LeftTa
               <th scope="col" className="r">
                 Freight
               </th>
-              <th scope="col" className="r">
+              <th scope="col" className="r whitespace-normal!">
                 Market’s fee, {formatShare(sellerFeeShare)}
               </th>
               <th scope="col" className="r">
