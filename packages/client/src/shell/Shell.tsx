@@ -16,6 +16,7 @@ export function Shell({ app, roleWord, nav }: Pick<ClientApp, 'app' | 'roleWord'
   const member = session?.member ?? null;
   const signedIn = member && nav.length > 0;
   useFocusOnNavigation();
+  useSectionInView(member !== null);
   return (
     <>
       <AppBar
@@ -96,4 +97,19 @@ function useFocusOnNavigation(): void {
     title?.setAttribute('tabindex', '-1');
     title?.focus({ preventScroll: true });
   }, [pathname]);
+}
+
+/** Space of the bar beside its last section, px. */
+const EDGE_PX = 16;
+
+/** On phones the sections scroll sideways: the one the reader is in must not lie outside. */
+function useSectionInView(isSignedIn: boolean): void {
+  const { pathname } = useLocation();
+  useEffect(() => {
+    const nav = document.querySelector<HTMLElement>('.bar-nav');
+    const current = nav?.querySelector<HTMLElement>('[aria-current]');
+    // Only sideways: the page may just have been put back to where the reader left it.
+    if (nav && current)
+      nav.scrollLeft = current.offsetLeft + current.offsetWidth + EDGE_PX - nav.offsetLeft - nav.clientWidth;
+  }, [pathname, isSignedIn]);
 }

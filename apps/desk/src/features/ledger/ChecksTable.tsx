@@ -4,7 +4,7 @@ import type { LedgerReport } from '@lydite/contracts';
 export function ChecksTable({ checks }: { checks: LedgerReport['checks'] }) {
   return (
     <div className="table-scroll relative" role="region" aria-label="Checks, table" tabIndex={0}>
-      <table className="table table-dense">
+      <table className="table table-dense min-w-0!">
         <caption className="sr-only">Checks</caption>
         <thead>
           <tr>
