@@ -94,10 +94,10 @@ async function findSettledDeal(read) {
   return `/deals/${(deals.find(({ state }) => state === 'settled') ?? deals[0]).code}`;
 }
 
-/** The draft with the most told of it, on its second page. */
+/** The draft with the most gold in it, on its second page. */
 async function findDraft(read) {
   const lots = await read('/my/lots');
   const drafts = lots.filter(({ state }) => state === 'draft');
-  const draft = drafts.toSorted((a, b) => (b.massG ?? 0) - (a.massG ?? 0))[0];
+  const draft = drafts.toSorted((a, b) => (b.goldG?.p50 ?? 0) - (a.goldG?.p50 ?? 0))[0];
   return `/sell/lots/${draft.code}/contents`;
 }
