@@ -5,11 +5,14 @@ import { createInbox, createRunner, jobHandlers, loop } from './work.ts';
 
 const settings = readSettings(process.env);
 const world = await openWorld(settings);
-const jobs = await startJobs({ url: settings.JOBS_DATABASE_URL, log: world.log, handlers: jobHandlers(world) });
+const handlers = jobHandlers(world);
+const jobs = await startJobs({ url: settings.JOBS_DATABASE_URL, log: world.log, handlers });
 const runner = createRunner(world, { alarm: jobs.ring });
 const onError = (error: unknown): void => world.log.error({ err: error }, 'worker');
 const inbox = createInbox(world);
 const loops = [runner, inbox].map((one) => loop(() => one.runOne(), { idleMs: 250, onError }));
+// A new market must not wait for the next ten minutes to have a price: listing needs one.
+handlers['prices.take']('').catch(onError);
 world.log.info('the worker runs');
 
 async function stop(): Promise<void> {
