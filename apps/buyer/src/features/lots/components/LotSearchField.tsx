@@ -7,7 +7,7 @@ const pauseMs = 300;
 
 /** Search by words or by a lot's code; `/` leads here from anywhere on the page. */
 export function LotSearchField({ query }: { query: LotQuery }) {
-  const { input, search } = useSearch(query);
+  const { input, search, searchNow } = useSearch(query);
   useSlashKey(input);
   const submit = (event: FormEvent) => {
     event.preventDefault();
@@ -25,6 +25,7 @@ export function LotSearchField({ query }: { query: LotQuery }) {
         maxLength={80}
         defaultValue={query.q}
         onChange={() => search(pauseMs)}
+        onBlur={searchNow}
       />
     </form>
   );
@@ -46,11 +47,14 @@ function useSearch(query: LotQuery) {
   const search = (afterMs: number) => {
     clearTimeout(timer.current);
     timer.current = setTimeout(() => {
+      timer.current = undefined;
       sent.current = input.current?.value.trim() ?? '';
       void navigate({ search: lotSearch(query, { q: sent.current }) }, { replace: true, preventScrollReset: true });
     }, afterMs);
   };
-  return { input, search };
+  /** Leaving the field asks at once: a search that came later would call off the page the reader has gone on to. */
+  const searchNow = () => timer.current !== undefined && search(0);
+  return { input, search, searchNow };
 }
 
 function useSlashKey(input: RefObject<HTMLInputElement | null>): void {
