@@ -46,6 +46,8 @@ const schema = z.object({
   DEMO_MAIL_URL: z.url().optional(),
   DEMO_SIGN_INS: z.string().optional(),
   LIMITS: flag.default(true),
+  /** Whether operators and assayers have their rights only with a second step at sign-in. */
+  TOTP_REQUIRED: flag.default(false),
   /** Number of proxies in front whose X-Forwarded-For is believed. */
   TRUSTED_PROXIES: z.coerce.number().int().min(0).max(5).default(0),
   LOG_LEVEL: z.enum(['trace', 'debug', 'info', 'warn', 'error', 'silent']).default('info'),

@@ -26,7 +26,19 @@ export const registerRequest = z.strictObject({
 });
 export type RegisterRequest = z.infer<typeof registerRequest>;
 
-export const signInRequest = z.strictObject({ email, password: z.string().min(1, 'Enter your password.').max(1024) });
+/** Six digits of the authenticator app, or a recovery code; gaps and dashes do not matter. */
+const secondStepCode = z
+  .string()
+  .trim()
+  .min(6, 'Enter the six digits of the app, or a recovery code.')
+  .max(40, 'Enter the six digits of the app, or a recovery code.');
+
+export const signInRequest = z.strictObject({
+  email,
+  password: z.string().min(1, 'Enter your password.').max(1024),
+  /** Wanted from members with a second step, who are answered `session.code_required` without it. */
+  code: secondStepCode.optional(),
+});
 export type SignInRequest = z.infer<typeof signInRequest>;
 export const tokenRequest = z.strictObject({ token: z.string().min(20).max(200) });
 export const resetRequest = z.strictObject({ email });
@@ -39,6 +51,27 @@ export const profileChange = z.strictObject({
   place,
   roles: z.array(z.enum(['seller', 'buyer'])),
 });
+
+export const totpCodeRequest = z.strictObject({ code: secondStepCode });
+export type TotpCodeRequest = z.infer<typeof totpCodeRequest>;
+
+/** The second step at sign-in as its member sees it. */
+export const totpView = z.object({ isOn: z.boolean(), recoveryCodesLeft: z.int() }).meta({ id: 'SecondStep' });
+export type TotpView = z.infer<typeof totpView>;
+
+/** What an authenticator app takes over; shown once, and worth nothing before it is confirmed. */
+export const totpSetup = z
+  .object({
+    /** Base32. */
+    secret: z.string(),
+    uri: z.string(),
+    /** The URI as a QR code: an SVG document of paths alone. */
+    qrSvg: z.string(),
+  })
+  .meta({ id: 'SecondStepSetup' });
+export type TotpSetup = z.infer<typeof totpSetup>;
+
+export const recoveryCodes = z.object({ recoveryCodes: z.array(z.string()) }).meta({ id: 'RecoveryCodes' });
 
 export const ownMember = z
   .object({
@@ -146,6 +179,28 @@ export const memberEndpoints = endpoints({
     summary: 'Change the password',
     access: 'signed-in',
     body: passwordChange,
+    response: 'none',
+    status: 204,
+  },
+  'GET /my/totp': { summary: 'The own second step at sign-in', access: 'signed-in', response: totpView },
+  'POST /my/totp': {
+    summary: 'Begin to set up a second step',
+    access: 'signed-in',
+    fresh: true,
+    body: nothing,
+    response: totpSetup,
+  },
+  'POST /my/totp/confirm': {
+    summary: 'Turn the second step on by a first code',
+    access: 'signed-in',
+    body: totpCodeRequest,
+    response: recoveryCodes,
+  },
+  'POST /my/totp/remove': {
+    summary: 'Turn the second step off',
+    access: 'signed-in',
+    fresh: true,
+    body: totpCodeRequest,
     response: 'none',
     status: 204,
   },

@@ -79,6 +79,23 @@ create table sign_in_failures (
 );
 create index sign_in_failures_key_idx on sign_in_failures (key, at desc);
 
+create table member_totp (
+  member_id uuid primary key references members,
+  secret bytea not null,
+  begun_at timestamptz not null default market_now(),
+  confirmed_at timestamptz,
+  last_step bigint
+);
+comment on column member_totp.secret is 'Encrypted by a key of the settings, bound to the member.';
+comment on column member_totp.last_step is 'The newest 30-second step whose code was used: no code counts twice.';
+
+create table recovery_codes (
+  hash text primary key,
+  member_id uuid not null references members,
+  used_at timestamptz
+);
+create index recovery_codes_member_idx on recovery_codes (member_id);
+
 create table notices (
   id uuid primary key,
   member_id uuid not null references members,

@@ -5,6 +5,8 @@ export interface Actor {
   id: string;
   sessionId: string;
   roles: readonly Role[];
+  /** Roles granted, but asleep until the member sets up a second step at sign-in. */
+  withheldRoles: readonly Role[];
   ip: string;
   requestId: string;
 }

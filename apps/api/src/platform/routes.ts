@@ -68,8 +68,10 @@ const allowed = (spec: EndpointSpec, actor: Actor | null): void => {
   if (spec.access === 'public') return;
   if (!actor) throw new AppError('session.required', 'Sign in to go on.');
   if (spec.access === 'signed-in') return;
-  if (!spec.access.some((role) => actor.roles.includes(role)))
-    throw new AppError('member.role_missing', `This needs the role ${spec.access.join(' or ')}.`);
+  if (spec.access.some((role) => actor.roles.includes(role))) return;
+  if (spec.access.some((role) => actor.withheldRoles.includes(role)))
+    throw new AppError('session.totp_missing', 'Set up the second step at sign-in first: it is on your account page.');
+  throw new AppError('member.role_missing', `This needs the role ${spec.access.join(' or ')}.`);
 };
 
 const parserOf = (spec: EndpointSpec): RequestHandler[] => {

@@ -28,7 +28,15 @@ export interface Tokens {
 const hashOf = (secret: string): string => createHash('sha256').update(secret).digest('base64url');
 const kindOf = (roles: readonly Role[]): 'operator' | 'others' => (roles.includes('operator') ? 'operator' : 'others');
 
-export function createSessions({ db, settings }: { db: DataSource; settings: Pick<Settings, 'JWT_SECRETS'> }) {
+/** With these come the desk and other members' affairs. */
+const guardedRoles: readonly Role[] = ['operator', 'assayer'];
+
+interface Options {
+  db: DataSource;
+  settings: Pick<Settings, 'JWT_SECRETS' | 'TOTP_REQUIRED'>;
+}
+
+export function createSessions({ db, settings }: Options) {
   const sign = (memberId: string, sessionId: string, roles: readonly Role[]): string =>
     jwt.sign({ sid: sessionId, typ: 'access', roles }, settings.JWT_SECRETS[0]!, {
       subject: memberId,
@@ -66,19 +74,27 @@ export function createSessions({ db, settings }: { db: DataSource; settings: Pic
     return { access: sign(memberId, sessionId, roles), refresh, sessionId, memberId };
   }
 
+  /** Asked of the row at each call, so that a second step set up or removed counts at once. */
+  async function withheldOf(memberId: string, roles: readonly Role[]): Promise<readonly Role[]> {
+    const guarded = roles.filter((role) => guardedRoles.includes(role));
+    if (!settings.TOTP_REQUIRED || guarded.length === 0) return [];
+    return (await hasSecondStep(db.manager, memberId)) ? [] : guarded;
+  }
+
   const gate: SessionGate = {
     async actorOf(req) {
       const text: unknown = req.cookies?.[cookieNames.access];
       const claim = typeof text === 'string' ? verify(text) : null;
-      return (
-        claim && {
-          id: claim.sub,
-          sessionId: claim.sid,
-          roles: claim.roles,
-          ip: req.ip ?? '',
-          requestId: String(req.id),
-        }
-      );
+      if (!claim) return null;
+      const withheldRoles = await withheldOf(claim.sub, claim.roles);
+      return {
+        id: claim.sub,
+        sessionId: claim.sid,
+        roles: claim.roles.filter((role) => !withheldRoles.includes(role)),
+        withheldRoles,
+        ip: req.ip ?? '',
+        requestId: String(req.id),
+      };
     },
     async assertLive(actor, { fresh }) {
       const rows: { fresh: boolean }[] = await db.query(
@@ -191,4 +207,13 @@ export async function rolesOf(tx: EntityManager, memberId: string): Promise<Role
     memberId,
   ]);
   return rows.map((row) => row.role);
+}
+
+/** Whether the member has confirmed a second step at sign-in. */
+export async function hasSecondStep(tx: EntityManager, memberId: string): Promise<boolean> {
+  const rows: unknown[] = await tx.query(
+    'select 1 from member_totp where member_id = $1 and confirmed_at is not null',
+    [memberId],
+  );
+  return rows.length > 0;
 }

@@ -133,6 +133,7 @@ export const actorOf = (people: People, key: FirmKey): Actor => ({
   id: people[key].id,
   sessionId: randomUUID(),
   roles: firmOf(key).roles,
+  withheldRoles: [],
   ip: '127.0.0.1',
   requestId: randomUUID(),
 });

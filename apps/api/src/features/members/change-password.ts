@@ -1,6 +1,7 @@
 import type { Actor } from '../../platform/actor.ts';
 import { AppError } from '../../platform/app-error.ts';
 import { audit } from '../../platform/audit.ts';
+import { hasSecondStep } from '../../platform/session.ts';
 import { inTransaction } from '../../platform/transaction.ts';
 import type { World } from '../../platform/world.ts';
 import { goodLinks, orderLink, spendOthers, spendToken } from './mail-tokens.ts';
@@ -30,12 +31,12 @@ export async function completeReset(
   { token, password }: { token: string; password: string },
 ): Promise<void> {
   const passwordHash = await passwords.hash(password);
-  const email = await inTransaction(db, async (tx) => {
+  const member = await inTransaction(db, async (tx) => {
     const memberId = await spendToken(tx, { token, purpose: 'reset' });
     if (!memberId)
       throw new AppError('member.token_spent', 'This link was used before or is too old. Ask for a new one.');
-    const member = await tx.findOneByOrFail(Member, { id: memberId });
-    assertStrong(password, member);
+    const found = await tx.findOneByOrFail(Member, { id: memberId });
+    assertStrong(password, found);
     // Whoever opened the link reads the address's mail: that confirms it too.
     await tx.query(
       'update members set password_hash = $2, email_confirmed_at = coalesce(email_confirmed_at, market_now()) where id = $1',
@@ -44,9 +45,10 @@ export async function completeReset(
     await spendOthers(tx, { memberId, purpose: 'reset' });
     await sessions.endAll(tx, memberId, { why: 'password reset' });
     await audit(tx, null, { action: 'member.password_reset', objectKind: 'member', objectId: memberId });
-    return member.email;
+    return found;
   });
-  await clearFailures(db, { email });
+  // A link by mail must not reset the brake on guessing codes of a second step.
+  if (!(await hasSecondStep(db.manager, member.id))) await clearFailures(db, { email: member.email });
 }
 
 /** Changes the own password; it needs the old one and ends every other session. */

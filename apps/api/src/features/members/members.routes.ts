@@ -42,6 +42,10 @@ export function memberRoutes(on: On, members: MembersService): void {
     if (tokens) setSessionCookies(res, tokens);
     return member;
   });
+  on('GET /my/totp', ({ actor }) => members.totp(actor));
+  on('POST /my/totp', ({ actor }) => members.beginTotp(actor));
+  on('POST /my/totp/confirm', ({ actor, body }) => members.confirmTotp(actor, body.code));
+  on('POST /my/totp/remove', ({ actor, body }) => members.removeTotp(actor, body.code));
   on('GET /sessions', ({ actor }) => members.sessions(actor));
   on('DELETE /sessions/:sessionId', ({ actor, params }) => members.endSession(actor, params.sessionId));
 }

@@ -9,10 +9,13 @@ import { changeProfile, endSession, ownSessions, type ProfileChange } from './ow
 import { createPasswords } from './passwords.ts';
 import { confirmAddress, register } from './register.ts';
 import { checkPassword, signIn } from './sign-in.ts';
+import { createSeal } from './totp-secret.ts';
+import { beginTotp, confirmTotp, removeTotp, totpView } from './totp.ts';
 
 export function createMembersService(world: Pick<World, 'db' | 'settings' | 'sessions'>) {
   const { db, sessions } = world;
-  const parts = { ...world, passwords: createPasswords({ pepper: world.settings.PASSWORD_PEPPER }) };
+  const pepper = world.settings.PASSWORD_PEPPER;
+  const parts = { ...world, passwords: createPasswords({ pepper }), seal: createSeal(pepper) };
 
   return {
     register: (request: RegisterRequest) => register(parts, request),
@@ -36,6 +39,10 @@ export function createMembersService(world: Pick<World, 'db' | 'settings' | 'ses
     changePassword: (actor: Actor, request: { currentPassword: string; newPassword: string }) =>
       changePassword(parts, actor, request),
     changeProfile: (actor: Actor, change: ProfileChange) => changeProfile(world, actor, change),
+    totp: (actor: Actor) => totpView(db.manager, actor),
+    beginTotp: (actor: Actor) => beginTotp(parts, actor),
+    confirmTotp: async (actor: Actor, code: string) => ({ recoveryCodes: await confirmTotp(parts, actor, code) }),
+    removeTotp: (actor: Actor, code: string) => removeTotp(parts, actor, code),
     sessions: (actor: Actor) => ownSessions(db.manager, actor),
     endSession: (actor: Actor, sessionId: string) => endSession(world, actor, sessionId),
   };

@@ -60,6 +60,11 @@ export async function noteFailure(db: DataSource, tries: readonly string[]): Pro
   await db.query('update sign_in_failures set at = market_now() where id = any($1)', [tries]);
 }
 
+/** Nothing was guessed in this try: it does not count, and the others stay as they are. */
+export async function takeBack(db: DataSource, tries: readonly string[]): Promise<void> {
+  await db.query('delete from sign_in_failures where id = any($1)', [tries]);
+}
+
 /**
  * A right password clears the account's count and takes its own try back; the address keeps its others, or one known account would
  * reset the brake for guessing others.
