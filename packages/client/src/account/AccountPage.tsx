@@ -4,6 +4,7 @@ import { useMember } from '../session/session.queries.ts';
 import { useTitle } from '../shell/use-title.ts';
 import { PasswordForm } from './PasswordForm.tsx';
 import { ProfileForm } from './ProfileForm.tsx';
+import { SecondStep } from './SecondStep.tsx';
 import { SessionList } from './SessionList.tsx';
 import { ThemeChoice } from './ThemeChoice.tsx';
 
@@ -34,6 +35,7 @@ export function Component() {
       </div>
       <ProfileForm member={member} />
       <PasswordForm />
+      <SecondStep />
       <SessionList />
       <ThemeChoice />
     </Page>

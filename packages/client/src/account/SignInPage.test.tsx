@@ -80,6 +80,42 @@ describe('signing in', () => {
     expect(screen.getByLabelText<HTMLInputElement>('E-mail').value).toBe('a@b.example');
     expect(document.title).toBe('Error: Sign in · Lydite');
   });
+  it('asks for the code of a second step, keeps what was typed, and sends all of it', async () => {
+    const user = userEvent.setup();
+    const bodies: unknown[] = [];
+    const answers = [
+      problem('session.code_required', 401, 'Enter the code of your authenticator app.'),
+      problem('session.code_wrong', 401, 'This code is not right.'),
+      Response.json({ member: { roles: ['buyer'] }, freshUntil: null, unreadNotices: 0 }),
+    ];
+    signIn = (body) => {
+      bodies.push(body);
+      return answers.shift()!;
+    };
+    const router = await open('/sign-in?next=%2Faccount');
+    await user.type(screen.getByLabelText('E-mail'), 'a@b.example');
+    await user.type(screen.getByLabelText('Password'), 'seven grams of gold');
+    expect(screen.queryByLabelText(/^Code/)).toBeNull();
+    await user.click(screen.getByRole('button', { name: 'Sign in' }));
+
+    const code = await screen.findByLabelText<HTMLInputElement>(/^Code/);
+    expect(document.activeElement).toBe(code);
+    expect([code.autocomplete, code.inputMode]).toEqual(['one-time-code', 'numeric']);
+    expect(screen.queryByRole('alert'), 'being asked is no error').toBeNull();
+    expect(screen.getByLabelText<HTMLInputElement>('Password').value).toBe('seven grams of gold');
+
+    await user.type(code, '111111{Enter}');
+    expect((await screen.findByRole('alert')).textContent).toBe('This code is not right.');
+    expect(screen.getByLabelText<HTMLInputElement>('E-mail').value).toBe('a@b.example');
+    expect(code.value, 'a code is not sent twice').toBe('');
+
+    await user.click(screen.getByRole('button', { name: 'Use a recovery code' }));
+    expect(screen.getByLabelText<HTMLInputElement>('Recovery code').inputMode, 'it has letters').toBe('text');
+    await user.type(code, 'abcd-efgh{Enter}');
+    await waitFor(() => expect(router.state.location.pathname).toBe('/account'));
+    const password = { email: 'a@b.example', password: 'seven grams of gold' };
+    expect(bodies).toEqual([password, { ...password, code: '111111' }, { ...password, code: 'abcd-efgh' }]);
+  });
   it('says where the demo keeps its mails when the address is not confirmed', async () => {
     const user = userEvent.setup();
     signIn = () => problem('session.email_unconfirmed', 403, 'Confirm your e-mail address first.');

@@ -8,6 +8,10 @@ import { otherHome, useApp } from '../shell/app-context.ts';
 import { useTitle } from '../shell/use-title.ts';
 import { DemoSignIns, MailboxLink } from './DemoHelp.tsx';
 import { safeNext } from './safe-next.ts';
+import { SecondStepField } from './SecondStepField.tsx';
+
+/** The field appears once the password was right: typing goes on in it. */
+const takeFocus = (input: HTMLInputElement | null) => input?.focus();
 
 export function Component() {
   const signIn = useSignIn();
@@ -16,14 +20,21 @@ export function Component() {
   const [search] = useSearchParams();
   const [email, setEmail] = useState('');
   const [password, setPassword] = useState('');
-  useTitle('Sign in', { invalid: signIn.isError });
+  const [code, setCode] = useState('');
+  const [wantsCode, setWantsCode] = useState(false);
+  const asksForCode = isApiError(signIn.error, 'session.code_required');
+  useTitle('Sign in', { invalid: signIn.isError && !asksForCode });
 
   const submit = (event: FormEvent) => {
     event.preventDefault();
     const next = search.get('next');
     signIn.mutate(
-      { email: email.trim(), password },
+      { email: email.trim(), password, ...(wantsCode && code.trim() ? { code: code.trim() } : {}) },
       {
+        onError: (error) => {
+          if (isApiError(error, 'session.code_required')) setWantsCode(true);
+          if (isApiError(error, 'session.code_wrong')) setCode('');
+        },
         onSuccess: ({ member }) => {
           const elsewhere = next || !member ? null : otherHome(app, member.roles);
           if (elsewhere) location.assign(elsewhere);
@@ -53,7 +64,10 @@ export function Component() {
           value={password}
           onChange={(event) => setPassword(event.target.value)}
         />
-        <Refusal>{signIn.error?.message}</Refusal>
+        {wantsCode && (
+          <SecondStepField id="code" ref={takeFocus} value={code} onChange={(event) => setCode(event.target.value)} />
+        )}
+        <Refusal>{asksForCode ? null : signIn.error?.message}</Refusal>
         {isApiError(signIn.error, 'session.email_unconfirmed') && <MailboxLink />}
         <Button look="primary" type="submit" className="justify-self-start" busy={signIn.isPending && 'Signing in'}>
           Sign in

@@ -3,6 +3,8 @@ import { call } from '../call/call.ts';
 
 export const sessionsQuery = queryOptions({ queryKey: ['sessions'], queryFn: () => call('GET /sessions') });
 
+export const secondStepQuery = queryOptions({ queryKey: ['second-step'], queryFn: () => call('GET /my/totp') });
+
 export function useEndSession() {
   const cache = useQueryClient();
   return useMutation({

@@ -1,4 +1,4 @@
-import type { OwnMember, Role, SessionView } from '@lydite/contracts';
+import type { OwnMember, Role, SessionView, SignInRequest } from '@lydite/contracts';
 import { queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { call } from '../call/call.ts';
 import { noteSignedIn, noteSignedOut, renewSession, wasSignedIn } from '../call/renew.ts';
@@ -23,7 +23,7 @@ export const hasRole = (member: OwnMember | null | undefined, role: Role): boole
 export function useSignIn() {
   const cache = useQueryClient();
   return useMutation({
-    mutationFn: (body: { email: string; password: string }) => call('POST /session', { body }),
+    mutationFn: (body: SignInRequest) => call('POST /session', { body }),
     onSuccess: (session) => {
       noteSignedIn();
       cache.setQueryData(sessionKey, session);
