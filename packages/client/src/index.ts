@@ -16,4 +16,5 @@ export type { ClientApp } from './shell/client-app.ts';
 export { OriginLink } from './shell/OriginLink.tsx';
 export { mountApp } from './shell/mount-app.tsx';
 export { RequireRole } from './shell/RequireRole.tsx';
+export { usePageReturn } from './shell/use-page-return.ts';
 export { useTitle } from './shell/use-title.ts';

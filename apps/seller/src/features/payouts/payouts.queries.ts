@@ -1,4 +1,4 @@
-import { call, withFreshPassword } from '@lydite/client';
+import { call, usePageReturn, withFreshPassword } from '@lydite/client';
 import { queryOptions, useMutation } from '@tanstack/react-query';
 import { useOnce } from '../../lib/use-once.ts';
 
@@ -17,5 +17,7 @@ export const soldQuery = queryOptions({
 /** Asks for the processor's own page, which opens once and for minutes, and goes there. */
 export function useSetUpPayouts() {
   const open = useOnce(() => withFreshPassword(() => call('POST /my/payout-account/link')));
-  return useMutation({ mutationFn: open, onSuccess: ({ url }) => location.assign(url) });
+  const setUp = useMutation({ mutationFn: open, onSuccess: ({ url }) => location.assign(url) });
+  usePageReturn(setUp.reset);
+  return setUp;
 }

@@ -6,6 +6,7 @@ import { Refusal } from '../../form/Refusal.tsx';
 import { useWords } from '../../market/use-words.ts';
 import { announce } from '../../shell/announce.ts';
 import { NotFoundPage } from '../../shell/ErrorPage.tsx';
+import { usePageReturn } from '../../shell/use-page-return.ts';
 import { useTitle } from '../../shell/use-title.ts';
 import { dealQuery, rememberDeal } from '../deals.queries.ts';
 import { checkedSteps, type CheckedStep } from '../parts/checked-steps.ts';
@@ -34,6 +35,7 @@ function CheckStep({ deal, step }: { deal: DealView; step: CheckedStep }) {
       rememberDeal(cache, answer);
     },
   });
+  usePageReturn(take.reset);
   useTitle(step.title, { invalid: take.isError });
   const isOffered = deal.actions.includes(step.action);
   if (!isOffered && take.isIdle) return <NotNow deal={deal} />;
