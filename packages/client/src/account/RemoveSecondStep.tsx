@@ -22,7 +22,7 @@ export function RemoveSecondStep({ recoveryCodesLeft, onRemoved }: RemoveSecondS
   });
   return (
     <>
-      <p className="mt-2">
+      <p className="mt-4">
         Signing in asks for a code of your authenticator app. Recovery codes left: {recoveryCodesLeft}.
       </p>
       <p className="small mute">

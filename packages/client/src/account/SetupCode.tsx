@@ -1,5 +1,6 @@
 import type { TotpSetup } from '@lydite/contracts';
 import { useEffect, useRef } from 'react';
+import { takeFocus } from './take-focus.ts';
 
 /** What the app takes over: a code to scan, and the same as text. As an image, the drawing cannot run anything. */
 export function SetupCode({ setup: { secret, uri, qrSvg } }: { setup: TotpSetup }) {
@@ -10,7 +11,7 @@ export function SetupCode({ setup: { secret, uri, qrSvg } }: { setup: TotpSetup 
     return () => URL.revokeObjectURL(url);
   }, [qrSvg]);
   return (
-    <div className="mt-4 flex flex-wrap items-center gap-6">
+    <div ref={takeFocus} tabIndex={-1} className="mt-4 flex flex-wrap items-center gap-6">
       <img ref={image} width={184} height={184} alt="Code to scan with the authenticator app" />
       <div className="min-w-0 max-w-md">
         <p>

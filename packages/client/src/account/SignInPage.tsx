@@ -9,9 +9,7 @@ import { useTitle } from '../shell/use-title.ts';
 import { DemoSignIns, MailboxLink } from './DemoHelp.tsx';
 import { safeNext } from './safe-next.ts';
 import { SecondStepField } from './SecondStepField.tsx';
-
-/** The field appears once the password was right: typing goes on in it. */
-const takeFocus = (input: HTMLInputElement | null) => input?.focus();
+import { takeFocus } from './take-focus.ts';
 
 export function Component() {
   const signIn = useSignIn();

@@ -25,6 +25,10 @@ describe('an address the market cannot show', () => {
     cleanup();
     expect(open('request.invalid', 400)).toBe('There is nothing at this address');
   });
+  it('leads operators without a second step to where it is set up', () => {
+    expect(open('session.totp_missing', 403)).toBe('Set up the second step first');
+    expect(screen.getByRole('link', { name: 'Go to your account' }).getAttribute('href')).toBe('/account');
+  });
   it('says otherwise what went wrong', () => {
     expect(open('internal', 500)).toBe('Something went wrong');
   });

@@ -9,6 +9,7 @@ export function ErrorPage() {
   // A page sends nothing but its address to be shown: what the market cannot read there leads nowhere either.
   if (isApiError(error) && (error.status === 404 || error.code === 'request.invalid')) return <NotFoundPage />;
   if (isRouteErrorResponse(error) && error.status === 404) return <NotFoundPage />;
+  if (isApiError(error, 'session.totp_missing')) return <SecondStepMissingPage />;
   return <FailedPage error={error} />;
 }
 
@@ -23,6 +24,24 @@ function FailedPage({ error }: { error: unknown }) {
         <button type="button" className="btn" onClick={() => location.reload()}>
           Try again
         </button>
+      </p>
+    </Page>
+  );
+}
+
+/** What operators meet first where the market wants a second step of them. */
+function SecondStepMissingPage() {
+  useTitle('Second step missing');
+  return (
+    <Page shape="narrow">
+      <h1>Set up the second step first</h1>
+      <p className="mt-4">
+        The desk opens to those who sign in with a code of an authenticator app besides the password.
+      </p>
+      <p className="actions">
+        <Link to="/account" className="btn btn-primary">
+          Go to your account
+        </Link>
       </p>
     </Page>
   );
