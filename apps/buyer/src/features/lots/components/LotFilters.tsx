@@ -89,7 +89,12 @@ export function LotFilters({ query, catalogue }: LotFiltersProps) {
         </Link>
       )}
       <span className="rack-order">
-        <ChipSelect {...sortChip} value={query.sort} onChange={(value) => set('sort', value)} />
+        <ChipSelect
+          label={sortChip.label}
+          options={sortChip.options}
+          value={query.sort}
+          onChange={(value) => set('sort', value)}
+        />
       </span>
     </div>
   );
