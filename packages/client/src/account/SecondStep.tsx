@@ -16,6 +16,8 @@ export function SecondStep() {
   const changed = async (text: string, codes?: string[]) => {
     setNewCodes(codes);
     announce(text, { own: true });
+    // What was refused for want of a second step is asked for again.
+    cache.removeQueries({ predicate: ({ state }) => state.status === 'error' });
     await Promise.all([cache.invalidateQueries(secondStepQuery), cache.invalidateQueries(sessionsQuery)]);
   };
 
