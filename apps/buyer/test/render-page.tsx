@@ -7,10 +7,9 @@ import { createMemoryRouter, RouterProvider } from 'react-router-dom';
 import { vi } from 'vitest';
 import { buyer, market, terms } from './market.ts';
 
-type Answer = unknown | ((body: unknown) => unknown);
 
 /** Answers of the API by route; a function sees the body. Throwing a `Refusal` answers with its problem, any other error is a lost connection. */
-export type Answers = Record<string, Answer>;
+export type Answers = Record<string, unknown>;
 
 export class Refusal extends Error {
   readonly problem: ProblemBody;

@@ -12,7 +12,7 @@ export async function goOnTo(page: Page, what: string): Promise<void> {
 }
 
 export const savedLine = (page: Page) =>
-  page.getByText(/^Saved \d\d:\d\d, here and on this device/).filter({ visible: true });
+  page.getByText(/^Saved \d\d:\d\d [A-Z]{3,4}, here and on this device/).filter({ visible: true });
 
 export const chooseInto = (page: Page, shot: string) => page.getByLabel(`Choose photos: ${shot}`);
 

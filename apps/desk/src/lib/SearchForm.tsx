@@ -10,7 +10,8 @@ export function SearchForm({ hint }: { hint: string }) {
   const [, setSearch] = useSearchParams();
   const submit = (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault();
-    const text = String(new FormData(event.currentTarget).get('q') ?? '').trim();
+    const typed = new FormData(event.currentTarget).get('q');
+    const text = typeof typed === 'string' ? typed.trim() : '';
     setSearch(text ? { q: text } : {});
   };
   return (

@@ -93,5 +93,6 @@ export function lotWorth({ draws, beadsG, massG, terms, pricePerGMinor, currency
 /** Gold at which a bid on a lot of this mass breaks even, where only its outline is known; null when no amount would do. */
 export function breakEvenAtMass(massG: number, terms: BuyerTerms, pricePerGMinor: number) {
   const one = { goldG: Float64Array.of(0), massG: Float64Array.of(massG) };
-  return valueLot(one, terms, { pricePerGMinor }).breakEvenGoldG;
+  const value = valueLot(one, terms, { pricePerGMinor });
+  return (amountMinor: number) => value.breakEvenGoldG(amountMinor);
 }

@@ -101,7 +101,7 @@ export function LotFilters({ query, catalogue }: LotFiltersProps) {
 }
 
 /** An address may ask for a figure that is not on offer; the select shows it all the same. */
-const withOwn = (options: readonly Option[], value: unknown): readonly Option[] =>
+const withOwn = (options: readonly Option[], value: string | number | undefined): readonly Option[] =>
   value === undefined || options.some(([own]) => own === String(value))
     ? options
     : [...options, [String(value), `Over ${String(value)}`]];
