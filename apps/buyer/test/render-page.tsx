@@ -7,7 +7,6 @@ import { createMemoryRouter, RouterProvider } from 'react-router-dom';
 import { vi } from 'vitest';
 import { buyer, market, terms } from './market.ts';
 
-
 /** Answers of the API by route; a function sees the body. Throwing a `Refusal` answers with its problem, any other error is a lost connection. */
 export type Answers = Record<string, unknown>;
 
